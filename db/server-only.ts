@@ -1,0 +1,2 @@
+// An empty module: lets worker, commands and tests import what Next keeps out of the browser.
+export {};
