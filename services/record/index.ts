@@ -1,0 +1,3 @@
+import 'server-only';
+export * from './write';
+export * from './canonical';
