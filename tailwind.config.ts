@@ -1,0 +1,92 @@
+import type { Config } from 'tailwindcss';
+
+/** A colour token of app/globals.css. The values live there, once for light and once for dark. */
+const token = (name: string) => `var(--${name})`;
+
+/** A step of the type scale: size and line come from app/globals.css, where phones get their own. */
+const step = (name: string): [string, { lineHeight: string }] => [
+  `var(--size-${name})`,
+  { lineHeight: `var(--line-${name})` },
+];
+
+export default {
+  content: ['./app/**/*.{ts,tsx}', './components/**/*.{ts,tsx}', './templates/drawings/**/*.{ts,tsx}'],
+  theme: {
+    screens: { sm: '600px', md: '900px', lg: '1200px' },
+    colors: {
+      transparent: 'transparent',
+      current: 'currentColor',
+      inherit: 'inherit',
+      paper: token('paper'),
+      card: token('card'),
+      well: token('well'),
+      ink: token('ink'),
+      ink2: token('ink2'),
+      ink3: token('ink3'),
+      rule: token('rule'),
+      edge: token('edge'),
+      enamel: token('enamel'),
+      'enamel-wash': token('enamel-wash'),
+      plate: token('plate'),
+      'plate-deep': token('plate-deep'),
+      'plate-line': token('plate-line'),
+      'on-enamel': token('on-enamel'),
+      'on-enamel2': token('on-enamel2'),
+      'on-deep2': token('on-deep2'),
+      'on-enamel-copper': token('on-enamel-copper'),
+      copper: token('copper'),
+      'copper-lite': token('copper-lite'),
+      'copper-deep': token('copper-deep'),
+      'copper-ink': token('copper-ink'),
+      'copper-wash': token('copper-wash'),
+      pine: token('pine'),
+      'pine-wash': token('pine-wash'),
+      ochre: token('ochre'),
+      'ochre-wash': token('ochre-wash'),
+      crimson: token('crimson'),
+      'crimson-wash': token('crimson-wash'),
+      'toast-link': token('toast-link'),
+      sheet: '#ffffff',
+      'sheet-ink': '#111111',
+    },
+    fontSize: {
+      poster: step('poster'),
+      page: step('page'),
+      verdict: step('verdict'),
+      section: step('section'),
+      panel: step('panel'),
+      lead: step('lead'),
+      floor: step('floor'),
+      body: step('body'),
+      table: step('table'),
+      caption: step('caption'),
+      head: step('head'),
+      axis: step('axis'),
+      bin: step('bin'),
+      total: step('total'),
+      price: step('price'),
+      value: step('value'),
+    },
+    borderRadius: {
+      none: '0',
+      tag: '4px',
+      label: '5px',
+      control: '6px',
+      plate: '7px',
+      panel: '8px',
+      full: '9999px',
+    },
+    boxShadow: {
+      none: 'none',
+      lift: '0 14px 36px var(--lift)',
+      lip: 'inset 0 -3px 0 var(--plate-deep)',
+      'lip-copper': 'inset 0 -3px 0 var(--copper-lite)',
+    },
+    extend: {
+      spacing: { target: '44px', floor: '72px', dock: '96px', spine: '84px' },
+      maxWidth: { page: '1280px', desk: '1376px', measure: '38rem' },
+      borderWidth: { '1.5': '1.5px' },
+      transitionDuration: { press: '120ms', pane: '180ms', rail: '260ms', wire: '400ms' },
+    },
+  },
+} satisfies Config;
