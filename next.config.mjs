@@ -1,5 +1,7 @@
 /** @type {import('next').NextConfig} */
 const config = {
+  // A second build beside the first: the tests' own, or another person's at the same time.
+  distDir: process.env.COILYARD_DIST ?? '.next',
   output: 'standalone',
   outputFileTracingRoot: import.meta.dirname,
   // Turbopack follows Knex's optional drivers unless Knex stays outside the bundle.
