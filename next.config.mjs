@@ -9,7 +9,8 @@ const config = {
   images: { unoptimized: true },
   poweredByHeader: false,
   productionBrowserSourceMaps: false,
-  experimental: { serverActions: { bodySizeLimit: '1mb' } },
+  // authInterrupts: `forbidden()` answers 403 with app/forbidden.tsx.
+  experimental: { authInterrupts: true, serverActions: { bodySizeLimit: '1mb' } },
 };
 
 export default config;

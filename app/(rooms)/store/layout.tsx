@@ -1,0 +1,16 @@
+import type { ReactNode } from 'react';
+import { Dock } from '@/components/shell/dock';
+import { storeDoors } from '@/components/shell/rooms';
+import { SkipLink } from '@/components/shell/skip-link';
+import { currentActor } from '@/services/people';
+
+/** Floor density, light whatever the system says: tablets stand under lamps. */
+export default async function StoreLayout({ children }: { children: ReactNode }) {
+  return (
+    <div data-theme="light" className="flex min-h-dvh flex-col text-floor">
+      <SkipLink />
+      <div className="flex-1">{children}</div>
+      <Dock label="Store" doors={storeDoors} actor={await currentActor()} />
+    </div>
+  );
+}

@@ -1,0 +1,28 @@
+import 'server-only';
+import { headers } from 'next/headers';
+import { forbidden, notFound, redirect } from 'next/navigation';
+import type { Actor } from '@/services/access';
+import { currentActor } from '@/services/people';
+import { Problem } from '@/services/problem';
+
+/**
+ * Reads a page's view as whoever asks. What is missing shows the page "not found", what is not allowed the page that
+ * says whom to ask; somebody who has not signed in is asked to, and comes back here.
+ */
+export async function view<T>(read: (actor: Actor) => Promise<T>): Promise<T> {
+  const actor = await currentActor();
+  try {
+    return await read(actor);
+  } catch (error) {
+    if (!(error instanceof Problem)) throw error;
+    if (error.kind === 'missing') notFound();
+    if (error.kind !== 'forbidden') throw error;
+    if (actor.kind === 'visitor') redirect(`/sign-in?next=${encodeURIComponent(await path())}`);
+    forbidden();
+  }
+}
+
+/** The path that was asked for; `proxy.ts` notes it, since a page is not told its own address. */
+async function path(): Promise<string> {
+  return (await headers()).get('x-path') ?? '/';
+}
