@@ -1,0 +1,62 @@
+import type Stripe from 'stripe';
+import { newId } from '../identifiers';
+
+const TO_ANSWER_SECONDS = 7 * 24 * 60 * 60;
+
+export function aDispute(charge: Stripe.Charge, reason: string, created: number): Stripe.Dispute {
+  return {
+    id: newId('du'),
+    object: 'dispute',
+    amount: charge.amount - charge.amount_refunded,
+    balance_transactions: [],
+    charge: charge.id,
+    created,
+    currency: charge.currency,
+    enhanced_eligibility_types: [],
+    evidence: {
+      access_activity_log: null,
+      billing_address: null,
+      cancellation_policy: null,
+      cancellation_policy_disclosure: null,
+      cancellation_rebuttal: null,
+      customer_communication: null,
+      customer_email_address: charge.billing_details.email,
+      customer_name: charge.billing_details.name,
+      customer_purchase_ip: null,
+      customer_signature: null,
+      duplicate_charge_documentation: null,
+      duplicate_charge_explanation: null,
+      duplicate_charge_id: null,
+      enhanced_evidence: {},
+      product_description: null,
+      receipt: null,
+      refund_policy: null,
+      refund_policy_disclosure: null,
+      refund_refusal_explanation: null,
+      service_date: null,
+      service_documentation: null,
+      shipping_address: null,
+      shipping_carrier: null,
+      shipping_date: null,
+      shipping_documentation: null,
+      shipping_tracking_number: null,
+      uncategorized_file: null,
+      uncategorized_text: null,
+    },
+    evidence_details: {
+      due_by: created + TO_ANSWER_SECONDS,
+      enhanced_eligibility: {},
+      has_evidence: false,
+      past_due: false,
+      submission_count: 0,
+      submission_method: 'not_submitted',
+    },
+    intended_submission_method: null,
+    is_charge_refundable: false,
+    livemode: false,
+    metadata: {},
+    payment_intent: charge.payment_intent,
+    reason,
+    status: 'needs_response',
+  };
+}
