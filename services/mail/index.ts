@@ -1,0 +1,3 @@
+import 'server-only';
+export * from './kinds';
+export * from './queue';
