@@ -7,7 +7,10 @@ export const metadata: Metadata = { title: 'Not here' };
 export default function NotFound() {
   return (
     <PlainPage title="Nothing stands at this address">
-      <p>It may have been moved, or the address has a slip in it. If a link of ours led you here, the link is wrong, not you.</p>
+      <p>
+        It may have been moved, or the address has a slip in it. If a link of ours led you here, the link is wrong, not
+        you.
+      </p>
       <p className="flex flex-wrap gap-3">
         <LinkButton href="/" variant="primary">
           See the kits

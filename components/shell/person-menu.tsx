@@ -61,7 +61,15 @@ export function PersonMenu({ actor, opens = 'below', named = false }: PersonMenu
   );
 }
 
-function MenuLink({ href, icon, label }: { href: string; icon: 'user' | (typeof rooms)[number]['icon']; label: string }) {
+function MenuLink({
+  href,
+  icon,
+  label,
+}: {
+  href: string;
+  icon: 'user' | (typeof rooms)[number]['icon'];
+  label: string;
+}) {
   return (
     <li>
       <Link href={href} className="flex min-h-target items-center gap-3 px-4 font-semibold hover:bg-enamel-wash">

@@ -91,11 +91,20 @@ export async function up(sql: Knex): Promise<void> {
   await createTable(sql, 'reservations', (table) => {
     table.string('id').primary();
     table.string('order_id').notNullable().references('orders.id');
-    table.string('state').notNullable().checkIn(['reserved', 'allocated', 'lapsed', 'given-back', 'used'], 'reservation_state');
+    table
+      .string('state')
+      .notNullable()
+      .checkIn(['reserved', 'allocated', 'lapsed', 'given-back', 'used'], 'reservation_state');
     table.integer('expires_at').notNullable();
     table.index(['state', 'expires_at'], 'reservations_due');
   });
-  await uniqueWhere(sql, 'reservations', 'one_live_reservation_an_order', ['order_id'], "state in ('reserved', 'allocated')");
+  await uniqueWhere(
+    sql,
+    'reservations',
+    'one_live_reservation_an_order',
+    ['order_id'],
+    "state in ('reserved', 'allocated')",
+  );
   await createTable(sql, 'reservation_lines', (table) => {
     table.string('reservation_id').notNullable().references('reservations.id');
     table.string('part_id').notNullable().references('parts.id').index('reservation_lines_by_part');

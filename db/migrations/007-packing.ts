@@ -43,6 +43,9 @@ export async function up(sql: Knex): Promise<void> {
     table.integer('needed').notNullable().checkBetween([1, 1_000_000], 'box_line_needed');
     table.integer('packed').notNullable().checkBetween([0, 1_000_000], 'box_line_packed');
     table.integer('position').notNullable();
+    /** When the packer found the suggested bin empty, and which one; the next suggestion passes it by. */
+    table.integer('told_empty_at');
+    table.string('told_empty_bin_id').references('bins.id').index('box_lines_by_told_bin');
     table.unique(['box_id', 'reference']);
     table.check('packed <= needed', [], 'box_line_not_over');
   });
