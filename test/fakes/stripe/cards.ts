@@ -1,4 +1,4 @@
-export type CardOutcome =
+type CardOutcome =
   | { kind: 'pays' }
   | { kind: 'disputes' }
   | { kind: 'asks' }

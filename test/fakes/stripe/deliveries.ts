@@ -35,11 +35,11 @@ const ANSWER_WITHIN_MS = 10_000;
 
 export class Deliveries {
   private queued = 0;
-  private stopped = false;
   private held: Delivery[] = [];
   private toReorder: Delivery[] = [];
   private readonly errands = new Set<object>();
   private waiters: (() => void)[] = [];
+  private readonly closing = new AbortController();
 
   constructor(private readonly world: Pick<World, 'settings' | 'clock' | 'store' | 'switches' | 'save'>) {}
 
@@ -92,7 +92,7 @@ export class Deliveries {
   }
 
   stop(): void {
-    this.stopped = true;
+    this.closing.abort();
     this.clear();
   }
 
@@ -148,7 +148,7 @@ export class Deliveries {
   private async send(delivery: Delivery): Promise<void> {
     const { clock, settings, store } = this.world;
     const event = store.shelves.events.get(delivery.eventId);
-    if (this.stopped || !event || !settings.webhook) return;
+    if (this.closing.signal.aborted || !event || !settings.webhook) return;
     const attempt: DeliveryAttempt = { at: clock.now(), status: null, error: null };
     delivery.attempts.push(attempt);
     try {
@@ -156,7 +156,7 @@ export class Deliveries {
     } catch (error) {
       attempt.error = error instanceof Error ? error.message : String(error);
     }
-    if (this.stopped || !store.shelves.deliveries.has(delivery.id)) return;
+    if (this.closing.signal.aborted || !store.shelves.deliveries.has(delivery.id)) return;
     this.conclude(delivery, event, attempt);
     this.world.save();
     settings.log(`${event.type} ${event.id}: ${attempt.status ?? attempt.error} (${delivery.state})`);
@@ -177,7 +177,7 @@ export class Deliveries {
     const response = await fetch(url, {
       method: 'POST',
       redirect: 'manual',
-      signal: AbortSignal.timeout(ANSWER_WITHIN_MS),
+      signal: AbortSignal.any([AbortSignal.timeout(ANSWER_WITHIN_MS), this.closing.signal]),
       headers: {
         'content-type': 'application/json; charset=utf-8',
         'user-agent': 'Stripe/1.0 (local stand-in)',

@@ -30,9 +30,10 @@ interface Call {
 /** The first answer under this key if there is one; else the key is in use until `remember` or `forget`. */
 export function claim(world: World, { key, path, tree, requestId }: Call): Remembered | undefined {
   const { remembered } = world.store.shelves;
+  dropOld(world);
   if (key.length > LONGEST_KEY) throw invalidRequest(`Idempotency keys can be up to ${LONGEST_KEY} characters long.`);
   const known = remembered.get(key);
-  if (known && known.at > world.clock.now() - KEPT_MS) {
+  if (known) {
     if (known.path !== path) throw keyOfAnotherRequest(key, 'endpoint');
     if (known.parameters !== fingerprint(tree)) throw keyOfAnotherRequest(key, 'parameters');
     if (!known.answer) throw keyInUse(key);
@@ -50,4 +51,12 @@ export function remember(world: World, key: string, answer: Answer): void {
 /** For a request that never began: wrong parameters, an outage, a rate limit. */
 export function forget(world: World, key: string): void {
   world.store.shelves.remembered.delete(key);
+}
+
+/** The shelf is in the order of first use, so the old ones stand in front. */
+function dropOld(world: World): void {
+  for (const [key, { at }] of world.store.shelves.remembered) {
+    if (at > world.clock.now() - KEPT_MS) return;
+    world.store.shelves.remembered.delete(key);
+  }
 }

@@ -26,8 +26,8 @@ export interface Settings {
   log: (line: string) => void;
 }
 
-export const DEFAULT_SECRET = 'whsec_demo_secret_of_the_stand_in';
-export const MIN_EXPIRY_SECONDS = 30 * 60;
+const DEFAULT_SECRET = 'whsec_demo_secret_of_the_stand_in';
+const MIN_EXPIRY_SECONDS = 30 * 60;
 export const MAX_EXPIRY_SECONDS = 24 * 60 * 60;
 const QUICK_RETRIES_MS = [25, 50, 100, 200];
 

@@ -22,7 +22,7 @@ export interface PaymentAttempt {
 
 export type PaymentAnswer = { kind: 'paid' } | { kind: 'asks' } | { kind: 'refused'; sentence: string };
 
-export const AUTHENTICATION_FAILED: Refusal = {
+const AUTHENTICATION_FAILED: Refusal = {
   code: 'payment_intent_authentication_failure',
   sentence: 'Your bank could not confirm that it is you. Nothing was taken. Try again or use another card.',
 };
@@ -33,6 +33,7 @@ const DEBIT_FAILED: Refusal = {
 
 export function pay(world: World, record: SessionRecord, card: TestCard, attempt: PaymentAttempt): PaymentAnswer {
   const intent = intentOf(world, record);
+  record.attempt = null;
   if (card.outcome.kind === 'refused') return refuse(world, intent, attempt, card.outcome);
   if (card.outcome.kind === 'asks') {
     record.attempt = attempt;

@@ -128,15 +128,23 @@ describe('a payment', () => {
     expect((await till.stripe.balanceTransactions.list()).data).toHaveLength(1);
   });
 
+  it('made with another card leaves nothing waiting at the bank', async () => {
+    const { id } = await till.stripe.checkout.sessions.create(anOrder());
+    await till.fake.pay(id, { card: '4000002760003184' });
+    await till.fake.pay(id);
+    expect(() => till.fake.settle(id, 'succeeded')).toThrow('No payment waits');
+    expect((await till.stripe.balanceTransactions.list()).data).toHaveLength(1);
+  });
+
   it('with a past date, no card of the list or no e-mail names each fault at its field', async () => {
     const { id } = await till.stripe.checkout.sessions.create(anOrder());
-    const { page, status } = await till.fake.pay(id, {
+    const { page, outcome } = await till.fake.pay(id, {
       card: '4111111111111111',
       expiry: '01/20',
       cvc: '1',
       email: 'ada',
     });
-    expect(status).toBe(422);
+    expect(outcome).toBe('refused');
     for (const field of ['email', 'number', 'expiry', 'cvc']) expect(page).toContain(`id="${field}-wrong"`);
     expect(page).toContain('Only test cards work here');
     expect((await till.stripe.paymentIntents.list()).data).toEqual([]);

@@ -12,7 +12,7 @@ interface Arrival {
 }
 
 /** An endpoint that notes what arrives and answers as told: one status a delivery, then 200. */
-export class Endpoint {
+class Endpoint {
   readonly arrivals: Arrival[] = [];
   answers: number[] = [];
 

@@ -7,7 +7,7 @@ export function decodeForm(encoded: string): FormTree {
   return withLists(root);
 }
 
-export function pathOf(key: string): string[] {
+function pathOf(key: string): string[] {
   const [head = '', ...rest] = key.split('[');
   return [head, ...rest.map((part) => part.replace(/\]$/, ''))];
 }

@@ -39,7 +39,7 @@ export const address = checked(
   () => 'Not a valid URL. It must begin with http:// or https://.',
 );
 export const email = checked(
-  (value) => /^[^\s@]+@[^\s@]+\.?[^\s@]+$/.test(value),
+  (value) => /^[^\s@]+@[^\s@]+$/.test(value),
   'email_invalid',
   (value) => `Invalid email address: ${value}`,
 );

@@ -3,7 +3,7 @@ import type { World } from '../world';
 import type { FormTree } from './form';
 import { readParameters } from './parameters';
 
-export type Work = (world: World, id: string) => object;
+type Work = (world: World, id: string) => object;
 
 export interface Route {
   method: 'GET' | 'POST';

@@ -43,13 +43,13 @@ class Desk {
 
   atTheTill(method: string, form: URLSearchParams): void {
     const { record, world } = this;
-    if (method !== 'POST') return this.show(200, payPage({ record, kept: NOTHING_KEPT, wrong: {} }));
+    if (method !== 'POST') return this.show('well', payPage({ record, kept: NOTHING_KEPT, wrong: {} }));
     const known = record.session.customer_details?.email ?? null;
     const read = readCardForm(form, known, new Date(world.clock.now()));
-    if (!read.ok) return this.show(422, payPage({ record, kept: read.kept, wrong: read.wrong }));
+    if (!read.ok) return this.show('refused', payPage({ record, kept: read.kept, wrong: read.wrong }));
     const answer = pay(world, record, read.card, newAttempt(read.card, read, read.expiry));
     if (answer.kind !== 'refused') return this.goOn(answer);
-    return this.show(402, payPage({ record, kept: read.kept, wrong: {}, refusal: answer.sentence }));
+    return this.show('refused', payPage({ record, kept: read.kept, wrong: {}, refusal: answer.sentence }));
   }
 
   atTheBank(method: string, form: URLSearchParams): void {
@@ -57,7 +57,7 @@ class Desk {
     if (!record.attempt) return this.redirect(`/pay/${record.id}`);
     const outcome = form.get('outcome');
     if (method !== 'POST' || (outcome !== 'complete' && outcome !== 'fail'))
-      return this.show(200, authenticationPage(record));
+      return this.show('well', authenticationPage(record));
     const { email, name, card } = record.attempt;
     const answer = authenticate(world, record, outcome === 'complete');
     if (answer.kind !== 'refused') return this.goOn(answer);
@@ -67,11 +67,11 @@ class Desk {
       last4: card.last4,
       expiry: `${String(card.expMonth).padStart(2, '0')} / ${String(card.expYear).slice(-2)}`,
     };
-    return this.show(402, payPage({ record, kept, wrong: {}, refusal: answer.sentence }));
+    return this.show('refused', payPage({ record, kept, wrong: {}, refusal: answer.sentence }));
   }
 
   closed(): void {
-    this.show(200, closedPage(this.record.session, this.successUrl()));
+    this.show('well', closedPage(this.record.session, this.successUrl()));
   }
 
   private goOn(answer: PaymentAnswer): void {
@@ -88,9 +88,10 @@ class Desk {
     this.response.writeHead(303, { location }).end();
   }
 
-  private show(status: number, body: Html): void {
-    const title = status === 200 ? 'Test payment' : 'Error: test payment';
-    show(this.response, status, title, body, this.record.session.success_url);
+  /** A refusal is 200 too: it is the page's own news, and a browser logs other statuses as faults of the page. */
+  private show(news: 'well' | 'refused', body: Html): void {
+    const title = news === 'well' ? 'Test payment' : 'Error: test payment';
+    show(this.response, 200, title, body, this.record.session.success_url);
   }
 }
 

@@ -1,8 +1,7 @@
 import { grouped, hasCheckDigit, testCard, type TestCard } from '../cards';
 import type { Expiry } from '../payments';
 
-export const FIELDS = ['email', 'number', 'expiry', 'cvc', 'name'] as const;
-export type Field = (typeof FIELDS)[number];
+export type Field = 'email' | 'number' | 'expiry' | 'cvc' | 'name';
 
 /** What stands in the form again after an error; never the card number or the security code. */
 export interface Kept {

@@ -24,7 +24,7 @@ export function payPage({ record, kept, wrong, refusal }: PayPage): Html {
       <h1>Pay ${total}</h1>
       ${lineTable(session, lines)} ${back(session)}
     </section>
-    <section>
+    <section class="till">
       <h2>Card</h2>
       ${problems(wrong, refusal)}
       <form method="post" action="/pay/${session.id}" novalidate>

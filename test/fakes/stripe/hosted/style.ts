@@ -36,5 +36,5 @@ ul.cards { list-style: none; margin: 0; padding: 0; font-size: 14px; line-height
 ul.cards li { display: flex; flex-wrap: wrap; gap: 0 12px; justify-content: space-between; padding: 6px 0; border-bottom: 1px solid var(--rule); }
 ul.cards code { font-size: 14px; }
 :focus-visible { outline: 3px solid var(--enamel); outline-offset: 2px; }
-@media (min-width: 760px) { main.wide { grid-template-columns: 1fr 1fr; } }
+@media (min-width: 760px) { main.wide { grid-template-columns: 1fr 1fr; grid-template-rows: auto 1fr; } .till { grid-row: span 2; } }
 `;
