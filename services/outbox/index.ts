@@ -1,2 +1,3 @@
 import 'server-only';
 export * from './queue';
+export * from './claim';

@@ -5,6 +5,7 @@ import { invalid, missing, parse, refused } from '../problem';
 import { now, reading, record, write } from '../record';
 import { hashPassword } from './password';
 import * as rows from './rows';
+import * as ways from './way-in-rows';
 import { passwordFault } from './rules';
 import { AcceptInvitation, type EnrolmentView, Token } from './schemas';
 import { enrolmentUri, factorFromBytes, qrOf, stepOf } from './second-factor';
@@ -16,7 +17,7 @@ const isOver = 'This invitation is used or older than a week. Ask the owner of t
 export async function readInvitation(actor: Actor, token: string): Promise<EnrolmentView> {
   must(actor, 'invitation.accept');
   const whole = Token.safeParse(token);
-  const invitation = whole.success ? await rows.findInvitation(reading(), { token_hash: hashOf(whole.data) }) : null;
+  const invitation = whole.success ? await ways.findInvitation(reading(), { token_hash: hashOf(whole.data) }) : null;
   if (!invitation || invitation.acceptedAt !== null || invitation.expiresAt <= now()) throw missing(isOver);
   const secret = factorFromBytes(factorFor(invitation.id));
   const uri = enrolmentUri(secret, invitation.email);
@@ -31,7 +32,7 @@ export async function readInvitation(actor: Actor, token: string): Promise<Enrol
 export async function acceptInvitation(actor: Actor, input: AcceptInvitation): Promise<{ email: string }> {
   must(actor, 'invitation.accept');
   const { token, password, code } = parse(AcceptInvitation, input);
-  const invitation = await rows.findInvitation(reading(), { token_hash: hashOf(token) });
+  const invitation = await ways.findInvitation(reading(), { token_hash: hashOf(token) });
   if (!invitation) throw missing(isOver);
   const fault = passwordFault(password, 'staff', [...invitation.name.split(' '), invitation.email.split('@')[0] ?? '']);
   if (fault !== null) throw invalid('The password needs another look.', { password: fault });
@@ -45,7 +46,7 @@ export async function acceptInvitation(actor: Actor, input: AcceptInvitation): P
   const passwordHash = await hashPassword(password);
 
   return write(actor, async (tx) => {
-    if (!(await rows.markAccepted(tx.sql, invitation.id, tx.now))) throw missing(isOver);
+    if (!(await ways.markAccepted(tx.sql, invitation.id, tx.now))) throw missing(isOver);
     const known = await rows.findPerson(tx.sql, { email: invitation.email });
     if (known && (known.kind !== 'staff' || known.disabledAt !== null)) {
       throw refused('This address has another account by now. Ask the owner of the yard for a new invitation.');

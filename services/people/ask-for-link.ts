@@ -5,6 +5,7 @@ import { parse } from '../problem';
 import { type Tx, record, write } from '../record';
 import { countInWindow } from './attempts';
 import * as rows from './rows';
+import * as ways from './way-in-rows';
 import { allowance, life } from './rules';
 import { AskForLink } from './schemas';
 import { blind, hashOf, tokenFor } from './secrets';
@@ -41,7 +42,7 @@ export async function sendLink(tx: Tx, email: string, visit: Visit): Promise<voi
     browserHash: hashOf(visit.browser),
     expiresAt: tx.now + life.link,
   };
-  await rows.insertLink(tx.sql, link, tx.now);
+  await ways.insertLink(tx.sql, link, tx.now);
   await record(tx, 'link.asked-for', { subject: { kind: 'person', id: person.id } });
   await mail.queue(tx, 'sign-in-link', { linkId }, linkId);
 }

@@ -5,6 +5,7 @@ import { forbidden, parse, refused } from '../problem';
 import { type Tx, record, write } from '../record';
 import { confirmFactor } from './confirm-factor';
 import * as rows from './rows';
+import * as ways from './way-in-rows';
 import { life } from './rules';
 import { InviteStaff, SendNewWayIn } from './schemas';
 import { hashOf, tokenFor } from './secrets';
@@ -43,7 +44,7 @@ async function invite(tx: Tx, to: { name: string; email: string; roles: readonly
   const { name, email, roles } = to;
   const id = newId();
   const tokenHash = hashOf(tokenFor('invitation', id));
-  await rows.insertInvitation(
+  await ways.insertInvitation(
     tx.sql,
     { id, name, email, roles, invitedBy, expiresAt: tx.now + life.invitation, tokenHash },
     tx.now,

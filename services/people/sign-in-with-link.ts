@@ -4,6 +4,7 @@ import { parse, refused } from '../problem';
 import { record, write } from '../record';
 import { forgetTries } from './attempts';
 import * as rows from './rows';
+import * as ways from './way-in-rows';
 import { UseLink } from './schemas';
 import { blind, hashOf } from './secrets';
 
@@ -18,8 +19,8 @@ export async function signInWithLink(actor: Actor, input: UseLink, browser: stri
   must(actor, 'account.create');
   const { token, forgetPassword } = parse(UseLink, input);
   return write(actor, async (tx) => {
-    const link = await rows.findLink(tx.sql, hashOf(token));
-    if (!link || !(await rows.useLink(tx.sql, hashOf(token), hashOf(browser), tx.now))) throw refused(worksOnce);
+    const link = await ways.findLink(tx.sql, hashOf(token));
+    if (!link || !(await ways.useLink(tx.sql, hashOf(token), hashOf(browser), tx.now))) throw refused(worksOnce);
     const person = await rows.getPerson(tx.sql, link.personId);
     if (person.kind !== 'customer' || person.disabledAt !== null) throw refused(worksOnce);
 

@@ -4,6 +4,7 @@ import { missing } from '../problem';
 import { now, reading } from '../record';
 import { needsFreshCode } from './confirm-factor';
 import * as rows from './rows';
+import * as ways from './way-in-rows';
 import type { AccountView, PeopleView } from './schemas';
 import { hashOf, tokenFor } from './secrets';
 
@@ -13,7 +14,7 @@ export async function listPeople(actor: Actor): Promise<PeopleView> {
   const sql = reading();
   const staff = await rows.listPersons(sql, 'staff');
   const names = new Map<string, string>(staff.map((person) => [person.id, person.name]));
-  const invitations = await rows.listOpenInvitations(sql, now());
+  const invitations = await ways.listOpenInvitations(sql, now());
   return {
     staff: staff.map(rows.toPersonView),
     invitations: invitations.map(({ id, name, email, roles, invitedBy, expiresAt }) => ({
@@ -47,7 +48,7 @@ export interface LinkMailView {
 export async function readLinkForMail(actor: Actor, linkId: string): Promise<LinkMailView | null> {
   must(actor, 'mail.send');
   const token = tokenFor('sign-in-link', linkId);
-  const link = await rows.findLink(reading(), hashOf(token));
+  const link = await ways.findLink(reading(), hashOf(token));
   if (!link || link.expiresAt <= now()) return null;
   const person = await rows.getPerson(reading(), link.personId);
   return { name: person.name, email: person.email, link: address(`/sign-in/link?token=${token}`) };
@@ -59,7 +60,7 @@ export async function readInvitationForMail(
   invitationId: string,
 ): Promise<(LinkMailView & { roles: readonly string[] }) | null> {
   must(actor, 'mail.send');
-  const invitation = await rows.findInvitation(reading(), { id: invitationId });
+  const invitation = await ways.findInvitation(reading(), { id: invitationId });
   if (!invitation || invitation.acceptedAt !== null || invitation.expiresAt <= now()) return null;
   const { name, email, roles } = invitation;
   return { name, email, roles, link: address(`/invitations/${tokenFor('invitation', invitationId)}`) };
