@@ -73,7 +73,7 @@ const table = {
   'catalogue.read': anyone,
   'basket.change': anyone,
   'order.place': anyone,
-  'order.read': either(ownOrder, role('owner'), role('packer')),
+  'order.read': either(ownOrder, role('owner')),
   'order.pay': ownOrder,
   'order.cancel': either(ownOrder, role('owner')),
   'order.claim': signedIn,
@@ -109,7 +109,8 @@ const sentences: Partial<Record<Deed, string>> = {
   'version.edit': 'Only a designer can change a version.',
   'version.send-to-check': 'Only a designer can send a version to check.',
   'box.pack': 'Only a packer can pack a box. Ask the owner for the role.',
-  'order.read': 'This order belongs to somebody else. Sign in with the address it was ordered with, or open the link in your e-mail.',
+  'order.read':
+    'This order belongs to somebody else. Sign in with the address it was ordered with, or open the link in your e-mail.',
   'order.list-own': 'Sign in to see your orders. A guest order opens from the link in its e-mail.',
 };
 

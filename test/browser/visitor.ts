@@ -1,0 +1,109 @@
+import { mkdirSync, readFileSync } from 'node:fs';
+import { createRequire } from 'node:module';
+import { join } from 'node:path';
+import { type Browser, type BrowserContext, type Page, chromium } from 'playwright-core';
+import { inject } from 'vitest';
+import { root } from '../../db/demo/steps.mjs';
+
+const flags = [
+  '--no-sandbox',
+  '--disable-gpu',
+  '--disable-quic',
+  '--no-first-run',
+  '--disable-background-networking',
+  '--disable-component-update',
+  '--disable-sync',
+];
+
+export const launch = (): Promise<Browser> =>
+  chromium.launch({ executablePath: process.env['CHROMIUM'] ?? '/usr/bin/chromium', args: flags });
+
+export const screens = {
+  desktop: { width: 1440, height: 900 },
+  tablet: { width: 1024, height: 768 },
+  phone: { width: 390, height: 844 },
+} as const;
+export type Screen = keyof typeof screens;
+
+const axeSource = readFileSync(createRequire(import.meta.url).resolve('axe-core/axe.min.js'), 'utf8');
+const tags = ['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa', 'best-practice'];
+
+/** One person at one screen: what they see, and every complaint of the browser while they look. */
+export class Visitor {
+  readonly complaints: string[] = [];
+
+  private constructor(
+    readonly page: Page,
+    readonly context: BrowserContext,
+    private readonly name: string,
+  ) {
+    page.on('console', (message) => {
+      if (message.type() === 'error') this.complaints.push(`${page.url()}: ${message.text()}`);
+    });
+    page.on('pageerror', (error) => this.complaints.push(`${page.url()}: ${error.message}`));
+  }
+
+  static async open(
+    browser: Browser,
+    name: string,
+    options: { screen?: Screen; dark?: boolean } = {},
+  ): Promise<Visitor> {
+    const context = await browser.newContext({
+      viewport: screens[options.screen ?? 'desktop'],
+      colorScheme: options.dark ? 'dark' : 'light',
+      // axe is evaluated into the page; the page's own policy is tested where the policy is the subject.
+      bypassCSP: true,
+      baseURL: inject('url'),
+      locale: 'en-GB',
+    });
+    return new Visitor(await context.newPage(), context, name);
+  }
+
+  async go(path: string): Promise<void> {
+    await this.page.goto(path);
+  }
+
+  /** Signs in through the page of demo sign-ins, as a person would. */
+  async signInAs(person: string): Promise<void> {
+    await this.go('/demo');
+    await this.page.getByRole('button', { name: new RegExp(`as ${person}`) }).click();
+    await this.page.waitForURL((url) => !url.pathname.startsWith('/demo'));
+  }
+
+  /** Keeps pictures of what stands on screen, at each width asked for. */
+  async picture(subject: string, widths: readonly Screen[] = ['desktop', 'phone']): Promise<void> {
+    const folder = join(root, 'test/artefacts/screens');
+    mkdirSync(folder, { recursive: true });
+    for (const width of widths) {
+      await this.page.setViewportSize(screens[width]);
+      await this.page.screenshot({ path: join(folder, `${this.name}-${subject}-${width}.png`), fullPage: true });
+    }
+    await this.page.setViewportSize(screens.desktop);
+  }
+
+  /** Violations that axe finds on the page as it stands, a line each. */
+  async faults(): Promise<string[]> {
+    await this.page.evaluate(axeSource);
+    return this.page.evaluate(async (runOnly) => {
+      // `axe` is what the source above has just defined in the page.
+      const { axe } = window as unknown as {
+        axe: {
+          run(options: unknown): Promise<{ violations: { id: string; impact: string; nodes: { html: string }[] }[] }>;
+        };
+      };
+      const { violations } = await axe.run({ runOnly });
+      return violations.map(
+        ({ id, impact, nodes }) => `${location.pathname}: ${id} (${impact}) ${nodes[0]?.html ?? ''}`,
+      );
+    }, tags);
+  }
+
+  /** The page is wider than the screen: something scrolls sideways. */
+  sideways(): Promise<boolean> {
+    return this.page.evaluate(() => document.documentElement.scrollWidth > document.documentElement.clientWidth);
+  }
+
+  async close(): Promise<void> {
+    await this.context.close();
+  }
+}
