@@ -8,18 +8,18 @@ const USE = `Usage: tsx test/fakes/stripe/main.ts [--port 12111] [--host 127.0.0
 /** A person who restarts the shop sees its events arrive soon, and again for some hours. */
 const PATIENT_RETRIES_MS = [2_000, 5_000, 15_000, 60_000, 300_000, 900_000, 3_600_000];
 
-const wholeNumber = z.string().regex(/^\d+$/, 'is a whole number').transform(Number);
+const wholeNumber = z.string().regex(/^\d+$/, 'must be a whole number').transform(Number);
 const flagsSchema = z.object({
   port: wholeNumber.pipe(z.number().max(65_535)).default(12_111),
   host: z.string().default('127.0.0.1'),
-  webhook: z.url().optional(),
-  secret: z.array(z.string().startsWith('whsec_')).optional(),
-  'public-url': z.url().optional(),
+  webhook: z.url('must be a whole address such as http://127.0.0.1:3000/api/stripe').optional(),
+  secret: z.array(z.string().startsWith('whsec_', 'must begin with whsec_')).optional(),
+  'public-url': z.url('must be a whole address such as http://127.0.0.1:12111').optional(),
   state: z.string().min(1).optional(),
   'min-expiry-seconds': wholeNumber.optional(),
   'retry-ms': z
     .string()
-    .regex(/^\d+(,\d+)*$/, 'is a list of milliseconds such as 2000,5000')
+    .regex(/^\d+(,\d+)*$/, 'must be a list of milliseconds such as 2000,5000')
     .transform((list) => list.split(',').map(Number))
     .default(PATIENT_RETRIES_MS),
   quiet: z.boolean().default(false),
@@ -42,7 +42,7 @@ function readFlags(): z.output<typeof flagsSchema> {
   const flags = flagsSchema.safeParse(values);
   if (flags.success) return flags.data;
   const { path, message } = flags.error.issues[0] ?? { path: [], message: 'cannot be read' };
-  throw new Error(`--${path.join('.')}: ${message}`);
+  throw new Error(`--${String(path[0])} ${message}.`);
 }
 
 async function main(): Promise<void> {

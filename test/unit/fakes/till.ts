@@ -106,3 +106,17 @@ function portOf(address: AddressInfo | string | null): number {
   if (address === null || typeof address === 'string') throw new Error('no port');
   return address.port;
 }
+
+export async function paidSession({ fake, stripe }: Till): Promise<Stripe.Checkout.Session> {
+  const { id } = await stripe.checkout.sessions.create(anOrder());
+  await fake.pay(id);
+  await fake.settled();
+  return stripe.checkout.sessions.retrieve(id, { expand: ['payment_intent.latest_charge'] });
+}
+
+export function chargeOf(session: Stripe.Checkout.Session): Stripe.Charge {
+  const intent = session.payment_intent;
+  if (intent === null || typeof intent === 'string') throw new Error('payment intent not expanded');
+  if (intent.latest_charge === null || typeof intent.latest_charge === 'string') throw new Error('charge not expanded');
+  return intent.latest_charge;
+}
