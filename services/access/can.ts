@@ -88,12 +88,15 @@ const table = {
   'stock.block': role('checker'),
 
   'box.list': role('packer', 'owner'),
+  'box.prepare': either(role('packer', 'owner'), system('worker', 'command')),
   'box.pack': role('packer'),
   'box.trace': role('packer', 'checker', 'owner', 'designer'),
   'order.ship': role('packer'),
 
   'paper.guide': either(ownOrder, staff),
   'paper.slip': role('packer', 'owner'),
+  'paper.label': role('packer', 'owner'),
+  'paper.invoice': either(ownOrder, role('owner')),
 
   'desk.read': role('owner'),
   'mail.send': system('worker'),

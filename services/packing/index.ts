@@ -1,0 +1,15 @@
+import 'server-only';
+export { boxesOfOrder } from './boxes-of-order';
+export { claimBox } from './claim-box';
+export { closeBox } from './close-box';
+export { readDispatch } from './dispatch';
+export { makeBoxesFor, prepareBoxes } from './make-boxes';
+export { markPrinted } from './mark-printed';
+export { readPickList } from './pick-list';
+export { putBack } from './put-back';
+export { scan } from './scan';
+export { ship } from './ship';
+export { tellEmpty } from './tell-empty';
+export { traceBox, traceLot } from './trace';
+export { listBoxes, readBox } from './views';
+export { weigh } from './weigh';

@@ -1,0 +1,332 @@
+import type { Knex } from 'knex';
+import type { BinId, BoxId, LineId, LotId, OrderId, VersionId } from '../ids';
+import { newId } from '../ids';
+import type { VersionState } from '../kits/schemas';
+import type { PartUnit } from '../parts/schemas';
+import { missing } from '../problem';
+import type { Tx } from '../record';
+import type { Instant } from '../time';
+import { type Fulfilment, claimHolds } from './rules';
+import type { BoxState, LotPlace } from './schemas';
+
+/** A box row with the names a person needs around it. */
+export interface BoxRow {
+  id: BoxId;
+  serial: string;
+  orderId: OrderId;
+  orderNumber: string;
+  buyer: string;
+  paidAt: Instant | null;
+  placedAt: Instant;
+  fulfilment: Fulfilment;
+  versionId: VersionId;
+  kitNumber: number;
+  kitCode: string;
+  kitName: string;
+  letter: string;
+  versionState: VersionState;
+  position: number;
+  of: number;
+  state: BoxState;
+  claimedBy: string | null;
+  claimedName: string | null;
+  claimedAt: Instant | null;
+  expectedMilligrams: number;
+  weighedMilligrams: number | null;
+  slipPrintedAt: Instant | null;
+  guidePrintedAt: Instant | null;
+  guideScannedAt: Instant | null;
+  closedAt: Instant | null;
+  closedName: string | null;
+  shipmentId: string | null;
+}
+
+/** Every read of boxes joins the same five tables; what differs is which boxes and in which order. */
+export const boxes = (sql: Knex) =>
+  sql('boxes')
+    .join('orders', 'orders.id', 'boxes.order_id')
+    .join('versions', 'versions.id', 'boxes.version_id')
+    .join('kits', 'kits.id', 'versions.kit_id')
+    .leftJoin('people as packers', 'packers.id', 'boxes.claimed_by')
+    .leftJoin('people as closers', 'closers.id', 'boxes.closed_by')
+    .select<BoxRow[]>({
+      id: 'boxes.id',
+      serial: 'boxes.serial',
+      orderId: 'boxes.order_id',
+      orderNumber: 'orders.number',
+      buyer: 'orders.name',
+      paidAt: 'orders.paid_at',
+      placedAt: 'orders.placed_at',
+      fulfilment: 'orders.fulfilment',
+      versionId: 'boxes.version_id',
+      kitNumber: 'kits.number',
+      kitCode: 'kits.code',
+      kitName: 'kits.name',
+      letter: 'versions.letter',
+      versionState: 'versions.state',
+      position: 'boxes.position',
+      state: 'boxes.state',
+      claimedBy: 'boxes.claimed_by',
+      claimedName: 'packers.name',
+      claimedAt: 'boxes.claimed_at',
+      expectedMilligrams: 'boxes.expected_milligrams',
+      weighedMilligrams: 'boxes.weighed_milligrams',
+      slipPrintedAt: 'boxes.slip_printed_at',
+      guidePrintedAt: 'boxes.guide_printed_at',
+      guideScannedAt: 'boxes.guide_scanned_at',
+      closedAt: 'boxes.closed_at',
+      closedName: 'closers.name',
+      shipmentId: 'boxes.shipment_id',
+    })
+    .select(sql('boxes as siblings').count('*').where('siblings.order_id', sql.ref('boxes.order_id')).as('of'));
+
+export async function getBox(sql: Knex, boxId: string): Promise<BoxRow> {
+  const row = await boxes(sql).where('boxes.id', boxId).first();
+  if (!row) throw missing('There is no such box. Look for it under Boxes, or scan its serial under Trace.');
+  return row;
+}
+
+export async function findBoxBySerial(sql: Knex, serial: string): Promise<BoxRow | undefined> {
+  return boxes(sql).where('boxes.serial', serial).first();
+}
+
+export const boxesOf = (sql: Knex, orderId: string): Promise<BoxRow[]> =>
+  boxes(sql).where('boxes.order_id', orderId).orderBy('boxes.position');
+
+export async function hasOpenBoxes(sql: Knex, orderId: string): Promise<boolean> {
+  const open = await sql('boxes').where('order_id', orderId).whereIn('state', ['to-pack', 'packing']).first('id');
+  return open !== undefined;
+}
+
+export interface BoxLineRow {
+  id: LineId;
+  boxId: BoxId;
+  reference: string;
+  partId: string;
+  partCode: string;
+  name: string;
+  kind: string;
+  unit: PartUnit;
+  needed: number;
+  packed: number;
+  position: number;
+  toldEmptyAt: Instant | null;
+  toldEmptyBinId: string | null;
+}
+
+export function linesOf(sql: Knex, boxIds: readonly string[]): Promise<BoxLineRow[]> {
+  return sql('box_lines')
+    .join('parts', 'parts.id', 'box_lines.part_id')
+    .whereIn('box_lines.box_id', boxIds)
+    .orderBy(['box_lines.box_id', 'box_lines.position'])
+    .select<BoxLineRow[]>({
+      id: 'box_lines.id',
+      boxId: 'box_lines.box_id',
+      reference: 'box_lines.reference',
+      partId: 'box_lines.part_id',
+      partCode: 'parts.code',
+      name: 'parts.name',
+      kind: 'parts.kind',
+      unit: 'parts.unit',
+      needed: 'box_lines.needed',
+      packed: 'box_lines.packed',
+      position: 'box_lines.position',
+      toldEmptyAt: 'box_lines.told_empty_at',
+      toldEmptyBinId: 'box_lines.told_empty_bin_id',
+    });
+}
+
+export type LotOfPart = LotPlace & { partId: string };
+
+/** Accepted lots of some parts that lie in bins, oldest receipt first. */
+export function lotsOf(sql: Knex, partIds: readonly string[]): Promise<LotOfPart[]> {
+  return sql('balances')
+    .join('lots', 'lots.id', 'balances.lot_id')
+    .join('bins', 'bins.id', 'balances.bin_id')
+    .whereIn('balances.part_id', partIds)
+    .where('lots.state', 'accepted')
+    .where('balances.on_hand', '>', 0)
+    .orderBy(['lots.received_at', 'lots.code', 'bins.position'])
+    .select<LotOfPart[]>({
+      partId: 'balances.part_id',
+      lotId: 'lots.id',
+      lotCode: 'lots.code',
+      binId: 'bins.id',
+      binCode: 'bins.code',
+      binPosition: 'bins.position',
+      onHand: 'balances.on_hand',
+    });
+}
+
+export interface LotRow {
+  id: LotId;
+  code: string;
+  partId: string;
+  partCode: string;
+  name: string;
+  state: 'quarantine' | 'accepted' | 'blocked';
+  supplier: string;
+  receivedAt: Instant;
+}
+
+export function findLot(sql: Knex, code: string): Promise<LotRow | undefined> {
+  return sql('lots').join('parts', 'parts.id', 'lots.part_id').where('lots.code', code).first<LotRow | undefined>({
+    id: 'lots.id',
+    code: 'lots.code',
+    partId: 'lots.part_id',
+    partCode: 'parts.code',
+    name: 'parts.name',
+    state: 'lots.state',
+    supplier: 'lots.supplier',
+    receivedAt: 'lots.received_at',
+  });
+}
+
+export const findPart = (sql: Knex, code: string) =>
+  sql('parts').where('code', code).first<{ id: string; code: string; name: string } | undefined>('id', 'code', 'name');
+
+/** A lot in a box, line by line: what was picked less what was put back. */
+export interface InBox {
+  lineId: LineId;
+  lotId: LotId;
+  lotCode: string;
+  lotState: LotRow['state'];
+  binId: BinId;
+  name: string;
+  quantity: number;
+}
+
+/** What lies in a box, the last picked first. */
+export async function inBox(sql: Knex, boxId: string): Promise<InBox[]> {
+  const picks = await sql('box_picks')
+    .join('lots', 'lots.id', 'box_picks.lot_id')
+    .join('parts', 'parts.id', 'box_picks.part_id')
+    .where('box_picks.box_id', boxId)
+    .orderBy('box_picks.at', 'desc')
+    .select<InBox[]>({
+      lineId: 'box_picks.box_line_id',
+      lotId: 'lots.id',
+      lotCode: 'lots.code',
+      lotState: 'lots.state',
+      binId: 'box_picks.bin_id',
+      name: 'parts.name',
+      quantity: 'box_picks.quantity',
+    });
+  const sums = new Map<string, InBox>();
+  for (const pick of picks) {
+    const key = `${pick.lineId} ${pick.lotId} ${pick.binId}`;
+    const sum = sums.get(key);
+    if (sum) sum.quantity += pick.quantity;
+    else sums.set(key, pick);
+  }
+  return [...sums.values()].filter((sum) => sum.quantity > 0);
+}
+
+/** Takes a free box, one's own, or one whose claim has lapsed: one conditional update decides between two packers. */
+export async function claim(tx: Tx, boxId: string, personId: string): Promise<boolean> {
+  const changed = await tx
+    .sql('boxes')
+    .where('id', boxId)
+    .whereIn('state', ['to-pack', 'packing'])
+    .where((free) =>
+      free
+        .whereNull('claimed_by')
+        .orWhere('claimed_by', personId)
+        .orWhere('claimed_at', '<=', tx.now - claimHolds),
+    )
+    .update({ state: 'packing', claimed_by: personId, claimed_at: tx.now });
+  return changed === 1;
+}
+
+/** Keeps the packer's claim alive with each thing done; false when the box is no longer in these hands. */
+export async function keepClaim(tx: Tx, boxId: string, personId: string, set: object = {}): Promise<boolean> {
+  const changed = await tx
+    .sql('boxes')
+    .where({ id: boxId, state: 'packing', claimed_by: personId })
+    .update({ claimed_at: tx.now, ...set });
+  return changed === 1;
+}
+
+/** Sets what a line has in the box, if it still has what the caller saw. */
+export async function setPacked(tx: Tx, line: Pick<BoxLineRow, 'id' | 'packed'>, packed: number): Promise<boolean> {
+  const changed = await tx
+    .sql('box_lines')
+    .where({ id: line.id, packed: line.packed })
+    .update({ packed, told_empty_at: null, told_empty_bin_id: null });
+  return changed === 1;
+}
+
+export interface Picked {
+  boxId: BoxId;
+  lineId: LineId;
+  partId: string;
+  lotId: string;
+  binId: string;
+  quantity: number;
+  personId: string;
+}
+
+export async function insertPick(tx: Tx, pick: Picked): Promise<void> {
+  await tx.sql('box_picks').insert({
+    id: newId(),
+    box_line_id: pick.lineId,
+    box_id: pick.boxId,
+    part_id: pick.partId,
+    lot_id: pick.lotId,
+    bin_id: pick.binId,
+    quantity: pick.quantity,
+    person_id: pick.personId,
+    at: tx.now,
+  });
+}
+
+export async function markToldEmpty(tx: Tx, lineId: string, binId: string): Promise<void> {
+  await tx.sql('box_lines').where('id', lineId).update({ told_empty_at: tx.now, told_empty_bin_id: binId });
+}
+
+export async function setClosed(tx: Tx, boxId: string, personId: string): Promise<boolean> {
+  const changed = await tx
+    .sql('boxes')
+    .where({ id: boxId, state: 'packing', claimed_by: personId })
+    .update({ state: 'closed', closed_by: personId, closed_at: tx.now });
+  return changed === 1;
+}
+
+export interface NewShipment {
+  id: string;
+  orderId: string;
+  carrier: string;
+  trackingNumber: string;
+  personId: string;
+}
+
+/** Adds the parcel and marks the order's boxes as gone with it. */
+export async function insertShipment(tx: Tx, shipment: NewShipment): Promise<void> {
+  await tx.sql('shipments').insert({
+    id: shipment.id,
+    order_id: shipment.orderId,
+    carrier: shipment.carrier,
+    tracking_number: shipment.trackingNumber,
+    shipped_at: tx.now,
+    shipped_by: shipment.personId,
+  });
+  await tx
+    .sql('boxes')
+    .where({ order_id: shipment.orderId, state: 'closed' })
+    .update({ state: 'shipped', shipment_id: shipment.id });
+}
+
+/** Moves an order's fulfilment when it still stands where expected. */
+export async function moveOrder(tx: Tx, orderId: string, from: Fulfilment, to: Fulfilment): Promise<boolean> {
+  const set = to === 'shipped' ? { fulfilment: to, shipped_at: tx.now } : { fulfilment: to };
+  const changed = await tx.sql('orders').where({ id: orderId, fulfilment: from }).update(set);
+  return changed === 1;
+}
+
+/** The next number of a counter: taken inside the transaction that uses it, never twice. */
+export async function nextCount(tx: Tx, name: string): Promise<number> {
+  await tx.sql('counters').insert({ name, value: 0 }).onConflict('name').ignore();
+  await tx.sql('counters').where({ name }).increment('value', 1);
+  const row = await tx.sql('counters').where({ name }).first<{ value: number }>('value');
+  return row?.value ?? 0;
+}

@@ -1,0 +1,170 @@
+import { lineMass } from '../kits/rules';
+import type { VersionContent, VersionState } from '../kits/schemas';
+import type { PartUnit } from '../parts/schemas';
+import { type Instant, days, minutes, showClock } from '../time';
+import type { BoxState, LotPlace, MassView } from './schemas';
+
+/** A claim holds this long after the packer's last scan; then somebody else may take the box over. */
+export const claimHolds = minutes(15);
+
+export const claimLapsed = (claimedAt: Instant, now: Instant) => now - claimedAt >= claimHolds;
+
+/** Paid orders leave within two days (our promise to buyers). */
+export const dispatchDue = (paidAt: Instant): Instant => paidAt + days(2);
+
+/** An order's fulfilment as packing may move it (kit-trade d.1). */
+export type Fulfilment = 'placed' | 'allocated' | 'backordered' | 'picking' | 'packed' | 'shipped' | 'cancelled';
+
+const packingMoves: Partial<Record<Fulfilment, readonly Fulfilment[]>> = {
+  allocated: ['picking'],
+  picking: ['packed'],
+  packed: ['picking', 'shipped'],
+};
+
+export const mayMove = (from: Fulfilment, to: Fulfilment) => packingMoves[from]?.includes(to) ?? false;
+
+/** Why a box of this version may not be packed or sent; empty when it may. */
+export function versionBar(state: VersionState, plate: { kitNumber: number; letter: string }): string {
+  if (state === 'released') return '';
+  const name = versionName(plate);
+  return state === 'withdrawn'
+    ? `Version ${name} was withdrawn, so nobody packs or sends it. Ask the owner what the buyer gets.`
+    : `Version ${name} is not released, so nobody packs or sends it. Tell the owner.`;
+}
+
+export const versionName = (plate: { kitNumber: number; letter: string }) => `${plate.kitNumber} ${plate.letter}`;
+
+/** "14 m", "350 mm", "2.5 g" or "4": an amount of stock as people say it. */
+export function amountText(quantity: number, unit: PartUnit): string {
+  if (unit === 'each') return String(quantity);
+  if (unit === 'gram') return `${trimmed(quantity / 1000, 2)} g`;
+  return quantity < 1000 ? `${quantity} mm` : `${trimmed(quantity / 1000, 2)} m`;
+}
+
+const trimmed = (value: number, decimals: number) => String(Number(value.toFixed(decimals)));
+
+interface Counted {
+  unit: PartUnit;
+  needed: number;
+  packed: number;
+}
+
+/** Wire and wax are cut to length: one piece, in the box or not. */
+export const piecesNeeded = (line: Counted) => (line.unit === 'each' ? line.needed : 1);
+export const piecesPacked = (line: Counted) =>
+  line.unit === 'each' ? line.packed : line.packed >= line.needed ? 1 : 0;
+export const isIn = (line: Counted) => line.packed >= line.needed;
+
+export function countPieces(lines: readonly Counted[]): { packed: number; needed: number } {
+  let [packed, needed] = [0, 0];
+  for (const line of lines) {
+    packed += piecesPacked(line);
+    needed += piecesNeeded(line);
+  }
+  return { packed, needed };
+}
+
+export const pieces = (count: number) => (count === 1 ? '1 piece' : `${count} pieces`);
+
+/**
+ * Where to fetch the next piece: the oldest accepted lot that has enough for it, passing by the bin that was found
+ * empty. A cut length must come from one reel; single pieces may come from several lots.
+ */
+export function suggest<Lot extends LotPlace>(
+  lots: readonly Lot[],
+  line: Counted & { toldEmptyBinId: string | null },
+): Lot | null {
+  const least = line.unit === 'each' ? 1 : line.needed - line.packed;
+  return lots.find((lot) => lot.onHand >= Math.max(1, least) && lot.binId !== line.toldEmptyBinId) ?? null;
+}
+
+/** A guide of six A4 sheets, 80 g/m2 at 0.0624 m2 each, for versions whose lines name no print. */
+const guideMilligrams = 30_000;
+
+/** What the closed box should weigh: every line of the version, prints included. */
+export function expectedMass(content: Pick<VersionContent, 'lines'>): number {
+  const hasPrint = content.lines.some((line) => line.part?.values.kind === 'print');
+  const lines = content.lines.reduce((sum, line) => sum + lineMass(line), 0);
+  return lines + (hasPrint ? 0 : guideMilligrams);
+}
+
+/** Two per cent or two grams, whichever is more: a missing coil or earphone shows, a missing washer does not (kit-trade e.4). */
+export function massLimits(expected: number): { low: number; high: number } {
+  const spare = Math.max(Math.round(expected * 0.02), 2000);
+  return { low: expected - spare, high: expected + spare };
+}
+
+export const grams = (milligrams: number) => (milligrams / 1000).toFixed(1);
+
+/** What the scale's reading says, and whether the lid may close on it. */
+export function weighing(expected: number, weighed: number | null, content: Pick<VersionContent, 'lines'>): MassView {
+  const { low, high } = massLimits(expected);
+  const range = `${grams(low)} to ${grams(high)} g`;
+  const view = { expected, low, high, weighed };
+  if (weighed === null) return { ...view, fits: false, sentence: `Not weighed yet. It should read ${range}.` };
+  if (weighed >= low && weighed <= high) {
+    return { ...view, fits: true, sentence: `${grams(weighed)} g is right: it should read ${range}.` };
+  }
+  const off = Math.abs(weighed - expected);
+  const like = partOfMass(content, off);
+  const hint = like === '' ? '' : ` That is about one ${like}.`;
+  const what = weighed < low ? `${grams(off)} g is missing.` : `${grams(off)} g is too much.`;
+  return {
+    ...view,
+    fits: false,
+    sentence: `${what}${hint} Look into the box, then weigh it again; it should read ${range}.`,
+  };
+}
+
+/** The part whose one piece comes nearest to a difference in mass, when it comes within a tenth. */
+function partOfMass({ lines }: Pick<VersionContent, 'lines'>, milligrams: number): string {
+  let best = { name: '', off: milligrams / 10 };
+  for (const line of lines) {
+    if (!line.part) continue;
+    const one = line.part.unit === 'each' ? line.part.massMilligrams : lineMass(line);
+    const off = Math.abs(one - milligrams);
+    if (off < best.off) best = { name: lowerFirst(line.part.name), off };
+  }
+  return best.name;
+}
+
+/** "Germanium detector" inside a sentence; a name that begins with an abbreviation keeps its capitals. */
+export const lowerFirst = (name: string) =>
+  /^[A-Z][a-z]/.test(name) ? name.charAt(0).toLowerCase() + name.slice(1) : name;
+
+export interface Closing {
+  state: BoxState;
+  bar: string;
+  lines: readonly (Counted & { name: string; reference: string })[];
+  blockedLots: readonly { lotCode: string; name: string }[];
+  slipPrintedAt: Instant | null;
+  guidePrintedAt: Instant | null;
+  guideScannedAt: Instant | null;
+  mass: Pick<MassView, 'weighed' | 'fits' | 'sentence'>;
+}
+
+/** Everything that stands between a box and its lid, a sentence each; none: it may close. */
+export function closeBlockers(box: Closing): string[] {
+  if (box.state === 'closed' || box.state === 'shipped') return ['This box is closed already.'];
+  const reasons: string[] = [];
+  if (box.bar !== '') reasons.push(box.bar);
+  const { packed, needed } = countPieces(box.lines);
+  if (packed < needed) {
+    const missing = box.lines.filter((line) => !isIn(line)).map((line) => line.reference);
+    reasons.push(`${pieces(needed - packed)} to go: ${missing.join(', ')}.`);
+  }
+  for (const lot of box.blockedLots) {
+    reasons.push(
+      `Lot ${lot.lotCode} (${lowerFirst(lot.name)}) was blocked meanwhile. Put its pieces back and take another lot.`,
+    );
+  }
+  if (box.guidePrintedAt === null) reasons.push('The guide is not printed.');
+  else if (box.guideScannedAt === null) reasons.push('The guide is not scanned. Scan the code on its cover.');
+  if (box.slipPrintedAt === null) reasons.push('The packing slip is not printed.');
+  if (!box.mass.fits) reasons.push(box.mass.weighed === null ? 'The box is not weighed.' : box.mass.sentence);
+  return reasons;
+}
+
+/** Says who has a box that somebody else wants. */
+export const takenSentence = (serial: string, by: string, since: Instant) =>
+  `${by} has box ${serial} since ${showClock(since)}. Take the next one.`;
