@@ -1,6 +1,38 @@
 import type { Knex } from 'knex';
 import { createTable, freezeChildren, freezeColumns, makeAppendOnly, uniqueWhere } from '../dialect';
 
+const frozenColumns = [
+  'kit_id',
+  'letter',
+  'circuit',
+  'guide',
+  'content',
+  'content_hash',
+  'sent_by',
+  'sent_at',
+  'verdict',
+  'created_by',
+];
+const moves = [
+  'draft>draft',
+  'draft>in-check',
+  'in-check>in-check',
+  'in-check>draft',
+  'in-check>held',
+  'in-check>released',
+  'held>held',
+  'released>released',
+  'released>withdrawn',
+  'withdrawn>withdrawn',
+];
+const badMove = `(old.state || '>' || new.state) not in (${moves.map((move) => `'${move}'`).join(', ')})`;
+/** Only a draft changes; calling a version back empties what was frozen. */
+const frozenChange = `(old.state <> 'draft' and new.state <> 'draft' and (${frozenColumns
+  .map((column) => `new.${column} is not old.${column}`)
+  .join(' or ')}))`;
+/** Nothing is released that nobody signed for, under the very hash it has. */
+const unsigned = `(new.state = 'released' and not exists (select 1 from sign_offs where sign_offs.version_id = new.id and sign_offs.decision = 'released' and sign_offs.content_hash = new.content_hash))`;
+
 /** Kits, their versions and lines, and the decisions of the check room. */
 export async function up(sql: Knex): Promise<void> {
   await createTable(sql, 'kits', (table) => {
@@ -45,14 +77,6 @@ export async function up(sql: Knex): Promise<void> {
     table.check("(state = 'draft') = (content is null)", [], 'version_frozen_unless_draft');
     table.check('(content is null) = (content_hash is null)', [], 'version_hash_with_content');
   });
-  await freezeColumns(
-    sql,
-    'versions',
-    ['kit_id', 'letter', 'circuit', 'guide', 'content', 'content_hash', 'sent_by', 'sent_at', 'created_by'],
-    "old.state <> 'draft' and (new.state <> 'draft' or old.state in ('held', 'released', 'withdrawn'))",
-    'a version that was sent to check keeps its content',
-  );
-
   await createTable(sql, 'version_editors', (table) => {
     table.string('version_id').notNullable().references('versions.id');
     table.string('person_id').notNullable().references('people.id').index('version_editors_by_person');
@@ -98,6 +122,13 @@ export async function up(sql: Knex): Promise<void> {
   });
   await makeAppendOnly(sql, 'sign_offs');
   await uniqueWhere(sql, 'sign_offs', 'one_release_a_version', ['version_id'], "decision = 'released'");
+  await freezeColumns(
+    sql,
+    'versions',
+    ['state', ...frozenColumns],
+    `${badMove} or ${frozenChange} or ${unsigned}`,
+    'a version that was sent to check keeps its content, and moves only as the check room decided',
+  );
 }
 
 export async function down(sql: Knex): Promise<void> {

@@ -62,7 +62,10 @@ const FoilCapacitor = z.strictObject({
   width: metres(0.005, 0.5, 'A plate is 5 to 500 mm wide.'),
   travel: metres(0.005, 0.5, 'A plate slides 5 to 500 mm.'),
   sheetThickness: PartValue(1e-6, 0.02, 'A sheet is 1 μm to 20 mm thick.'),
-  sheetPermittivity: z.number().min(1, 'Relative permittivity is 1 to 12.').max(12, 'Relative permittivity is 1 to 12.'),
+  sheetPermittivity: z
+    .number()
+    .min(1, 'Relative permittivity is 1 to 12.')
+    .max(12, 'Relative permittivity is 1 to 12.'),
   faces: z.int().min(1, 'At least one face.').max(40),
   min: farad,
 });
@@ -114,7 +117,10 @@ const AerialWire = z.strictObject({
   length: metres(0.5, 200, 'An aerial wire is 0.5 to 200 m long.'),
   radius: metres(0.00005, 0.005, 'An aerial wire is 0.1 to 10 mm thick.'),
 });
-const EarthLead = z.strictObject({ kind: z.literal('earth-lead'), length: metres(0.2, 50, 'A lead is 0.2 to 50 m long.') });
+const EarthLead = z.strictObject({
+  kind: z.literal('earth-lead'),
+  length: metres(0.2, 50, 'A lead is 0.2 to 50 m long.'),
+});
 const Hardware = z.strictObject({ kind: z.literal('hardware') });
 const Tool = z.strictObject({ kind: z.literal('tool') });
 const Print = z.strictObject({ kind: z.literal('print') });
@@ -193,7 +199,12 @@ interface KindEntry {
 export const partKinds: Record<PartKind, KindEntry> = {
   'coil-former': { label: 'Coil former', unit: 'each', places: ['tuning coil'], silhouette: 'coil-tube' },
   wire: { label: 'Wire', unit: 'metre', places: ['tuning coil', 'hardware'], silhouette: 'reel' },
-  'variable-capacitor': { label: 'Variable capacitor', unit: 'each', places: ['tuning capacitor'], silhouette: 'vanes' },
+  'variable-capacitor': {
+    label: 'Variable capacitor',
+    unit: 'each',
+    places: ['tuning capacitor'],
+    silhouette: 'vanes',
+  },
   'foil-capacitor': { label: 'Foil capacitor set', unit: 'each', places: ['tuning capacitor'], silhouette: 'foil' },
   'fixed-capacitor': {
     label: 'Fixed capacitor',
@@ -212,6 +223,9 @@ export const partKinds: Record<PartKind, KindEntry> = {
   print: { label: 'Print', unit: 'each', places: ['print'], silhouette: 'guide' },
   packaging: { label: 'Packaging', unit: 'each', places: ['packaging'], silhouette: 'packet' },
 };
+
+/** The kinds in the order they are listed. */
+export const PART_KINDS = Object.keys(partKinds) as [PartKind, ...PartKind[]]; // the keys of the table above
 
 export const PartCode = z
   .string()
@@ -249,3 +263,24 @@ export const PartView = z.strictObject({
   stock: z.strictObject({ onHand: z.int(), available: z.int() }),
 });
 export type PartView = z.infer<typeof PartView>;
+
+export const ListParts = z.strictObject({
+  kind: z.enum(PART_KINDS).optional(),
+  place: Place.optional(),
+  /** A piece of the code or the name. */
+  q: z.string().trim().max(80).optional(),
+  /** The code of the last part of the page before. */
+  after: z.string().max(20).optional(),
+  retired: z.boolean().optional(),
+});
+export type ListParts = z.input<typeof ListParts>;
+
+export interface PartPage {
+  parts: PartView[];
+  /** Hand it back as `after` for the next page; null on the last one. */
+  next: string | null;
+}
+
+/** A part is retired, never removed: versions go on naming it. Retiring can be taken back. */
+export const RetirePart = z.strictObject({ partId: PartId, basedOn: z.int(), retired: z.boolean() });
+export type RetirePart = z.infer<typeof RetirePart>;

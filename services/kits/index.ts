@@ -1,0 +1,12 @@
+import 'server-only';
+export { type BenchKit, type BenchVersion, type VerdictSummary, listVersions, summaryOf } from './bench-list';
+export { createKit } from './create-kit';
+export { JUDGED, evaluateApart } from './evaluate-apart';
+export { type Evaluation } from './evaluation';
+export { freezeVersion, readDraft, setState, thawVersion } from './freeze';
+export { type Frozen, currentRelease, frozenContent, readFrozen } from './frozen';
+export { readVersionForMail } from './read-for-mail';
+export { saveCircuit, saveGuide } from './save-circuit';
+export { addLine, removeLine, saveLine } from './save-line';
+export { startVersion } from './start-version';
+export { type KitView, listKits, readVersion, storedVerdict } from './views';
