@@ -131,8 +131,8 @@ export function demoEnvironment({ port, payPort, smtpPort, database }) {
   };
 }
 
-const tsx = join(root, 'node_modules/.bin/tsx');
-export const tsxArgs = (script, ...args) => [tsx, [join(root, script), ...args]];
+// tsx as a loader, not as a command: its wrapper leaves its child running when it is killed.
+const tsxArgs = (script, ...args) => [process.execPath, ['--import', 'tsx', join(root, script), ...args]];
 
 export function prepareDatabase(environment) {
   const quiet = { env: environment };
