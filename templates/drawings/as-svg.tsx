@@ -110,10 +110,19 @@ export type SvgDrawingProps = {
   /** CSS pixels; the other side follows the drawing. Without either it takes the width it is given. */
   width?: number;
   height?: number;
+  /** Ink lines keep their width in pixels however large the drawing: for posters. Wire still grows with its coil. */
+  steadyLines?: boolean;
   className?: string;
 };
 
-export function SvgDrawing({ drawing, scheme = 'screen', width, height, className = '' }: SvgDrawingProps) {
+export function SvgDrawing({
+  drawing,
+  scheme = 'screen',
+  width,
+  height,
+  steadyLines = false,
+  className = '',
+}: SvgDrawingProps) {
   const ratio = drawing.width / drawing.height;
   const size =
     width !== undefined
@@ -124,27 +133,31 @@ export function SvgDrawing({ drawing, scheme = 'screen', width, height, classNam
   const name = drawing.title === null ? { 'aria-hidden': true } : { role: 'img', 'aria-label': drawing.title };
   return (
     <svg viewBox={`0 0 ${drawing.width} ${drawing.height}`} {...size} {...name} className={className}>
-      <Shapes shapes={drawing.shapes} scheme={scheme} />
+      <Shapes shapes={drawing.shapes} look={{ scheme, steadyLines }} />
     </svg>
   );
 }
 
-function Shapes({ shapes, scheme }: { shapes: readonly Shape[]; scheme: Scheme }) {
+type Look = { scheme: Scheme; steadyLines: boolean };
+
+function Shapes({ shapes, look }: { shapes: readonly Shape[]; look: Look }) {
   return shapes.map((shape, index) =>
     shape.kind === 'group' ? (
       <g key={index} transform={transformOf(shape.move)}>
-        <Shapes shapes={shape.shapes} scheme={scheme} />
+        <Shapes shapes={shape.shapes} look={look} />
       </g>
     ) : (
-      <One key={index} shape={shape} scheme={scheme} />
+      <One key={index} shape={shape} look={look} />
     ),
   );
 }
 
-function One({ shape, scheme }: { shape: Geometry & Paint; scheme: Scheme }) {
+function One({ shape, look }: { shape: Geometry & Paint; look: Look }) {
+  const { scheme, steadyLines } = look;
   const paint = {
     className: `${fills[scheme][shape.fill ?? 'none']} ${strokes[scheme][shape.stroke ?? 'none']}`,
     ...(shape.stroke !== undefined && { strokeWidth: shape.line ?? 1 }),
+    ...(steadyLines && shape.stroke === 'ink' && { vectorEffect: 'non-scaling-stroke' as const }),
     ...(shape.dash !== undefined && { strokeDasharray: shape.dash }),
     ...(shape.roundEnds === true && { strokeLinecap: 'round' as const, strokeLinejoin: 'round' as const }),
     ...(shape.opacity !== undefined && { opacity: shape.opacity }),

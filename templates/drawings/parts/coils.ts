@@ -15,13 +15,16 @@ export function flatCoil(cx: number, cy: number, r: number, coil: FlatCoil, line
   const turns = Math.min(coil.turns, MOST_TURNS_DRAWN);
   const shapes: Shape[] = [];
   const step = 360 / spokes;
-  const half = Math.min(4, step / 6);
+  const halfWidth = r * Math.min(0.048, 0.5 / spokes);
   for (let index = 0; index < spokes; index += 1) {
     const angle = index * step;
-    const [ax, ay] = onCircle(cx, cy, r * 0.27, angle - half);
-    const [bx, by] = onCircle(cx, cy, r, angle - half * 0.7);
-    const [ex, ey] = onCircle(cx, cy, r, angle + half * 0.7);
-    const [fx, fy] = onCircle(cx, cy, r * 0.27, angle + half);
+    // Straight spokes: the same half width at the hub and at the end, as an angle at either radius.
+    const spread = (radius: number) => (Math.asin(halfWidth / radius) * 180) / Math.PI;
+    const hub = r * 0.27;
+    const [ax, ay] = onCircle(cx, cy, hub, angle - spread(hub));
+    const [bx, by] = onCircle(cx, cy, r, angle - spread(r));
+    const [ex, ey] = onCircle(cx, cy, r, angle + spread(r));
+    const [fx, fy] = onCircle(cx, cy, hub, angle + spread(hub));
     shapes.push(
       path(`M${ax} ${ay}L${bx} ${by}L${ex} ${ey}L${fx} ${fy}Z`, { fill: 'card', stroke: 'ink', line: lineWidth }),
     );
@@ -33,7 +36,7 @@ export function flatCoil(cx: number, cy: number, r: number, coil: FlatCoil, line
     shapes.push(
       path(woundTurn({ cx, cy, spokes, step, turn, inner, pitch }), {
         stroke: COPPERS[turn % 3] ?? 'copper',
-        line: at(Math.max(pitch * 0.55, lineWidth * 0.9)),
+        line: at(Math.max(pitch * 0.6, lineWidth * 0.6)),
         roundEnds: true,
       }),
     );
