@@ -70,6 +70,7 @@ const table = {
   'evaluation.run': anyone,
 
   'price.set': role('owner'),
+  'delivery.set': role('owner'),
   'catalogue.read': anyone,
   'basket.change': anyone,
   'order.place': anyone,
