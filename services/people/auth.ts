@@ -185,7 +185,7 @@ async function addressOf(): Promise<string> {
 }
 
 /** Where somebody goes after signing in: the page asked for, or the person's own first screen. */
-export function afterSignIn(actor: Actor, next: string | undefined): string | null {
+export function afterSignIn(actor: Actor, next: string | null): string | null {
   if (actor.kind === 'visitor' || actor.kind === 'system') return null;
   const asked = safePath(next);
   return asked ?? firstScreen({ kind: actor.kind, roles: actor.kind === 'staff' ? actor.roles : [] });

@@ -19,5 +19,6 @@ export {
   readInvitationForMail,
   readLinkForMail,
   readPersonForMail,
+  readStaff,
 } from './views';
 export type { Visit } from './visit';

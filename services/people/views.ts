@@ -5,7 +5,7 @@ import { now, reading } from '../record';
 import { needsFreshCode } from './confirm-factor';
 import * as rows from './rows';
 import * as ways from './way-in-rows';
-import type { AccountView, PeopleView } from './schemas';
+import type { AccountView, PeopleView, PersonView } from './schemas';
 import { hashOf, tokenFor } from './secrets';
 
 /** Staff and open invitations, for the owner. */
@@ -27,6 +27,14 @@ export async function listPeople(actor: Actor): Promise<PeopleView> {
     })),
     needsCode: needsFreshCode(),
   };
+}
+
+/** One of the staff, for the page that changes roles. */
+export async function readStaff(actor: Actor, personId: string): Promise<{ person: PersonView; needsCode: boolean }> {
+  must(actor, 'person.list');
+  const person = await rows.getPerson(reading(), personId);
+  if (person.kind !== 'staff') throw missing('Nobody of the staff is here. Go back to the list of people.');
+  return { person: rows.toPersonView(person), needsCode: needsFreshCode() };
 }
 
 /** One's own account. */
