@@ -34,7 +34,7 @@ export function ReachTable({
     })),
   ];
   return (
-    <Disclosure summary="Show as table" isOpen={isOpen}>
+    <Disclosure summary="Show as table" of={`of ${name.toLowerCase()}`} isOpen={isOpen}>
       <Table
         caption={`${name}, in kilohertz`}
         density="tight"

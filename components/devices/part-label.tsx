@@ -76,6 +76,9 @@ export function PartLabel(props: PartLabelProps) {
           <>
             <span className="font-figures text-value font-semibold">{value}</span>
             {unit !== undefined && <span className="ml-1 text-head text-ink2">{unit}</span>}
+            {typeof tolerance === 'number' && (
+              <span className="block text-axis text-ink2 sm:hidden">±{tolerance} %</span>
+            )}
           </>
         )}
       </span>

@@ -67,8 +67,8 @@ export function TrayPlace(props: TrayPlaceProps) {
         looks[state],
       )}
     >
-      <span className="flex min-h-7 items-start justify-between gap-2 leading-6">
-        <b className="min-w-0">{state === 'wrong' ? (word ?? stateWords.wrong) : name}</b>
+      <span className="flex min-h-7 flex-wrap items-start justify-between gap-2 leading-6">
+        <b>{state === 'wrong' ? (word ?? stateWords.wrong) : name}</b>
         <StateMark state={state} isFloor={isFloor} />
       </span>
       <span
@@ -81,8 +81,8 @@ export function TrayPlace(props: TrayPlaceProps) {
       >
         {drawing}
       </span>
-      <span className="flex min-h-7 items-center justify-between gap-2">
-        <span className="font-figures font-semibold">
+      <span className="flex min-h-7 flex-wrap items-center justify-between gap-2">
+        <span className="font-figures font-semibold whitespace-nowrap">
           {counted}
           {state === 'bin-empty' && <span className="font-text font-normal">, {word ?? 'told'}</span>}
         </span>

@@ -5,6 +5,8 @@ import { Icon } from './icon';
 export type DisclosureProps = {
   /** "Show as table". */
   summary: ReactNode;
+  /** Read after the summary, where several on a page say the same: "of the reach". */
+  of?: string;
   children: ReactNode;
   /** `link` beside a chart, `row` for questions and folded sections. */
   look?: 'link' | 'row';
@@ -13,7 +15,7 @@ export type DisclosureProps = {
 };
 
 /** Native details: works without a script, and opens when the page is searched. */
-export function Disclosure({ summary, children, look = 'link', isOpen = false, className }: DisclosureProps) {
+export function Disclosure({ summary, of, children, look = 'link', isOpen = false, className }: DisclosureProps) {
   return (
     <details open={isOpen} className={classes('group', look === 'row' && 'border-b border-rule', className)}>
       <summary
@@ -25,7 +27,10 @@ export function Disclosure({ summary, children, look = 'link', isOpen = false, c
         )}
       >
         {look === 'row' && <Icon name="open" size={18} className="text-ink2 group-open:rotate-180" />}
-        {summary}
+        <span>
+          {summary}
+          {of !== undefined && <span className="sr-only"> {of}</span>}
+        </span>
       </summary>
       <div className={look === 'link' ? 'pt-3' : 'pb-4'}>{children}</div>
     </details>

@@ -57,7 +57,7 @@ export function QuantityStepper(props: QuantityStepperProps) {
   return (
     <span
       className={classes(
-        'inline-flex items-center overflow-hidden rounded-control border-1.5 border-ink bg-card',
+        'inline-flex w-fit items-center overflow-hidden rounded-control border-1.5 border-ink bg-card',
         heights[size],
       )}
     >

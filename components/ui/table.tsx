@@ -153,6 +153,6 @@ function Cell<Row>({ column, row, padding }: { column: Column<Row>; row: Row; pa
 }
 
 function tone(kind: 'chosen' | 'stops' | undefined): string | false {
-  if (kind === 'chosen') return 'bg-enamel-wash';
-  return kind === 'stops' && 'bg-crimson-wash shadow-[inset_4px_0_0_var(--crimson)]';
+  if (kind === 'chosen') return 'bg-enamel-wash [&>*:first-child]:pl-3 max-sm:px-3';
+  return kind === 'stops' && 'bg-crimson-wash shadow-[inset_4px_0_0_var(--crimson)] [&>*:first-child]:pl-3 max-sm:px-3';
 }
