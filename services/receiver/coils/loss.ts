@@ -40,7 +40,7 @@ function skinInto(bare: Metre, frequency: Hertz, resistivity: number, into: Skin
   const qi = (zi * tr) / size;
   into.delta = delta;
   into.f = 1 - qr / 2;
-  // j / (2 - q): the real part is -Im(2 - q) / |2 - q|^2 times -1.
+  // The real part of j / (2 - q) is Im(2 - q) / |2 - q|^2.
   const dr = 2 - qr;
   const di = -qi;
   into.x = di / (dr * dr + di * di);
@@ -110,7 +110,9 @@ export function windingResistance(winding: Winding, frequency: Hertz, scratch: S
   const rate = frequency * MU_0;
   if (strands <= 1) return wire * (scratch.f * direct + rate * scratch.x * (winding.phi - 1));
   const own = (scratch.f * direct * winding.lay) / strands;
-  const near = (strands * TWO_PI * frequency * MU_0 * (bare / 2) * (bare / 2) * scratch.x * winding.phi) / (TWO_PI * (bundle / 2) * (bundle / 2));
+  const near =
+    (strands * TWO_PI * frequency * MU_0 * (bare / 2) * (bare / 2) * scratch.x * winding.phi) /
+    (TWO_PI * (bundle / 2) * (bundle / 2));
   return wire * (own + near);
 }
 

@@ -44,7 +44,7 @@ export function nagaoka(diameter: Metre, length: Metre): number {
   const e: Elliptic = { first: 0, second: 0 };
   elliptic(square, complement, e);
   const bracket = ((length * length) / (diameter * diameter)) * (e.first - e.second) + e.second - Math.sqrt(square);
-  return (4 * bracket) / (3 * PI * complement * 1);
+  return (4 * bracket) / (3 * PI * complement);
 }
 
 /** Lundin's closed form, within 2.5e-6: kept as a cross-check. */

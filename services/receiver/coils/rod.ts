@@ -50,7 +50,9 @@ export function rodInductance(shape: RodShape): Henry {
   within('coilLength', shape.coilLength / shape.rodLength, 0.05, 0.9);
   const offset = Math.abs(shape.offset ?? 0);
   if (offset + shape.coilLength / 2 > shape.rodLength / 2) {
-    throw new InvalidInput([{ path: 'offset', message: 'The coil reaches beyond the end of the rod: move it inward.' }]);
+    throw new InvalidInput([
+      { path: 'offset', message: 'The coil reaches beyond the end of the rod: move it inward.' },
+    ]);
   }
   return rodFormula(shape);
 }

@@ -31,14 +31,7 @@ export function rosaMutual(turns: number): number {
   const i5 = i3 * i2;
   const i7 = i5 * i2;
   return (
-    LN_TWO_PI -
-    1.5 -
-    (log(turns) * i) / 6 -
-    0.33084236 * i -
-    i3 / 120 +
-    i5 / 504 -
-    0.0011925 * i7 +
-    0.000507 * i7 * i2
+    LN_TWO_PI - 1.5 - (log(turns) * i) / 6 - 0.33084236 * i - i3 / 120 + i5 / 504 - 0.0011925 * i7 + 0.000507 * i7 * i2
   );
 }
 

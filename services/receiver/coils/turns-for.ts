@@ -28,7 +28,10 @@ export function turnsFor(wanted: WantedCoil): WoundChoice {
   const at = (turns: number): Henry => solenoid({ ...shape, turns });
   if (most < 1 || at(most) < target) {
     throw new InvalidInput([
-      { path: 'formerLength', message: 'The former is too short for this inductance: take a longer former or thinner wire.' },
+      {
+        path: 'formerLength',
+        message: 'The former is too short for this inductance: take a longer former or thinner wire.',
+      },
     ]);
   }
   let low = 1;
@@ -49,7 +52,8 @@ export function tapFor(shape: SolenoidShape & { voltageRatio: number }): { turns
   for (let tapTurns = 1; tapTurns < shape.turns; tapTurns += 1) {
     const { l1, m } = sections({ ...shape, tapTurns });
     const ratio = (l1 + m) / whole;
-    if (Math.abs(ratio - shape.voltageRatio) < Math.abs(best.ratio - shape.voltageRatio)) best = { turns: tapTurns, ratio };
+    if (Math.abs(ratio - shape.voltageRatio) < Math.abs(best.ratio - shape.voltageRatio))
+      best = { turns: tapTurns, ratio };
   }
   return best;
 }

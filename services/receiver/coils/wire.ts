@@ -97,14 +97,15 @@ export interface WireNeed {
   turns: number;
   diameter: Metre;
   pitch: Metre;
-  /** Both leads together. */
-  leads: Metre;
-  taps: number;
-  tapLoop: Metre;
+  /** Both leads together; twice 150 mm is common practice. */
+  leads?: Metre | undefined;
+  taps?: number | undefined;
+  /** Wire in the twisted loop of a tap. */
+  tapLoop?: Metre | undefined;
 }
 
 /** Length of wire a winder needs: winding, leads and tap loops. */
-export function wireLength({ turns, diameter, pitch, leads, taps, tapLoop }: WireNeed): Metre {
+export function wireLength({ turns, diameter, pitch, leads = 0.3, taps = 0, tapLoop = 0.08 }: WireNeed): Metre {
   return windingLength(turns, diameter, pitch) + leads + taps * tapLoop;
 }
 

@@ -52,7 +52,7 @@ export function sha256(text: string): string {
   bytes.push(0x80);
   while (bytes.length % 64 !== 56) bytes.push(0);
   for (let shift = 56; shift >= 0; shift -= 8) {
-    bytes.push(shift >= 32 ? Math.floor(bits / 4294967296) >>> (shift - 32) & 255 : (bits >>> shift) & 255);
+    bytes.push(shift >= 32 ? (Math.floor(bits / 4294967296) >>> (shift - 32)) & 255 : (bits >>> shift) & 255);
   }
   const state = [...start];
   const words = new Int32Array(64);

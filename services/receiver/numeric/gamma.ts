@@ -16,7 +16,8 @@ export function lnGamma(x: number): number {
   const square = inverse * inverse;
   const series =
     inverse *
-    (1 / 12 - square * (1 / 360 - square * (1 / 1260 - square * (1 / 1680 - square * (1 / 1188 - square * (691 / 360360))))));
+    (1 / 12 -
+      square * (1 / 360 - square * (1 / 1260 - square * (1 / 1680 - square * (1 / 1188 - square * (691 / 360360))))));
   const value = (z - 0.5) * log(z) - z + HALF_LN_TWO_PI + series;
   return shift === 1 ? value - log(product) : value;
 }

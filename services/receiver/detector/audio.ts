@@ -1,0 +1,18 @@
+import type { Ohm, Volt } from '../units';
+import { rectifyBehind, type Diode } from './diode';
+
+/** Average depth of programme modulation (common practice). */
+export const MODULATION = 0.3;
+
+/**
+ * Open audio voltage of a detector: half the difference of the rectified voltages at the crest and the trough of the
+ * modulation, along the audio load line through the bias point.
+ * @see evaluate.md rule 4
+ */
+export function audioVoltage(d: Diode, open: Volt, source: Ohm, dcLoad: Ohm, audioLoad: Ohm): Volt {
+  const bias = rectifyBehind(d, open, source, dcLoad);
+  const line = { vdc: bias.vdc, idc: bias.vdc / dcLoad, slope: audioLoad };
+  const crest = rectifyBehind(d, open * (1 + MODULATION), source, line);
+  const trough = rectifyBehind(d, open * (1 - MODULATION), source, line);
+  return (crest.vdc - trough.vdc) / 2;
+}

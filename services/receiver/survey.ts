@@ -1,0 +1,140 @@
+import { audioAt } from './audio';
+import { boxesOf } from './coverage/boxes';
+import { cornersOf } from './coverage/corners';
+import { limitsOf } from './coverage/limits';
+import { marginsOf, reachAsFilled, reachOf, scanPoints, type Ends } from './coverage/reach';
+import { directResistance } from './coils/loss';
+import { resonance } from './coils/self-capacitance';
+import type { Design } from './design';
+import { detectorFacts } from './detector/facts';
+import { earphoneCircuit } from './earphone/facts';
+import { audioLoad, directLoad, OPEN } from './earphone/loads';
+import { middleOf, type Figures, type Sounding } from './figures';
+import { coilResistanceAt } from './network/circuit';
+import { sectionRows } from './network/fill-wound';
+import { planOf, type Plan } from './network/plan';
+import type { Rules } from './rules';
+import { centre } from './schema/value';
+import { loadAt, soundingAt } from './soundings';
+import { TWO_PI } from './units';
+import type { Verdict } from './verdict';
+
+export interface SurveyOptions {
+  seed: number;
+  /** 0 leaves the boxes out. */
+  boxes: number;
+  rules: Rules;
+  onProgress?: ((done: number, total: number) => void) | undefined;
+}
+
+/** A plan with the detector's load of the middle of the band, at nominal values; and the scan's frequencies. */
+export interface Prepared {
+  plan: Plan;
+  points: Float64Array;
+}
+
+export function prepared(design: Design): Prepared {
+  const plan = planOf(design);
+  plan.fill(plan.nominal);
+  const phone = earphoneCircuit(design);
+  loadAt(plan, detectorFacts(design).diode, directLoad(phone) ?? OPEN, middleOf(design));
+  plan.fill(plan.nominal);
+  return { plan, points: scanPoints(plan) };
+}
+
+/** Nominal reach of a design alone. */
+export function nominalReach(design: Design): Ends {
+  const { plan, points } = prepared(design);
+  return reachAsFilled(plan, plan.nominal, points);
+}
+
+function aerialScaled({ plan, points }: Prepared, scale: number): Ends {
+  plan.circuit.aerialScale = scale;
+  const ends = reachOf(plan, plan.nominal, points);
+  plan.circuit.aerialScale = 1;
+  return ends;
+}
+
+function coilOf({ plan }: Prepared): Verdict['coil'] {
+  const { circuit, design, wound } = plan;
+  const { coil } = design;
+  const f = middleOf(design);
+  const factor = coil.lFactor === undefined ? 1 : centre(coil.lFactor);
+  let sections = [[circuit.l]];
+  if (coil.kind === 'measured' && coil.sections !== undefined) {
+    const rows = coil.sections;
+    sections = rows.map((_, i) =>
+      rows.map((_row, j) => factor * centre(rows[Math.min(i, j)]?.[Math.max(i, j)] ?? NaN)),
+    );
+  } else if (wound !== null && coil.taps !== undefined) {
+    const taps = [coil.taps.aerial, coil.taps.detector].filter((tap) => tap !== undefined);
+    const ends = [...new Set(taps)].sort((a, b) => a - b);
+    sections = sectionRows(wound, [...ends, wound.turns]).map((row) => row.map((l) => factor * l));
+  }
+  const wire = wound === null ? null : wound.wireLength();
+  return {
+    l: circuit.l,
+    sections,
+    q: (TWO_PI * f * circuit.l) / coilResistanceAt(circuit, f),
+    cSelf: circuit.cSelf,
+    selfResonance: circuit.cSelf > 0 ? resonance(circuit.l, circuit.cSelf) : null,
+    wireLength: wire,
+    length: wound === null ? null : wound.length(),
+    rDc:
+      wound === null || wire === null
+        ? null
+        : directResistance(wire, wound.wire.bare, wound.wire.strands, centre(design.temperature)),
+  };
+}
+
+/** Works out every figure of a design; the findings are made from them. */
+export function survey(design: Design, { seed, boxes, rules, onProgress }: SurveyOptions): Figures {
+  const ready = prepared(design);
+  const { plan, points } = ready;
+  const phone = earphoneCircuit(design);
+  const detector = detectorFacts(design);
+  const path = directLoad(phone);
+  const dcLoad = path ?? OPEN;
+  const load = audioLoad(phone);
+  const loadG = plan.circuit.loadG;
+
+  const nominal = reachOf(plan, plan.nominal, points);
+  const reach = {
+    nominal,
+    corners: cornersOf(plan, points, nominal),
+    aerialHalf: aerialScaled(ready, 0.5),
+    aerialDouble: aerialScaled(ready, 2),
+  };
+  const limits = limitsOf(plan, points);
+  const share = boxes === 0 ? null : boxesOf(plan, { seed, boxes, confidence: rules.yieldConfidence, onProgress });
+  plan.fill(plan.nominal);
+  const coil = coilOf(ready);
+
+  const { band } = design;
+  const sound = (f: number): Sounding => {
+    const sounding = soundingAt(plan, detector.diode, dcLoad, f);
+    plan.fill(plan.nominal);
+    return sounding;
+  };
+  const soundings: Figures['soundings'] = [sound(band.firstCarrier), sound(middleOf(design)), sound(band.lastCarrier)];
+  plan.circuit.loadG = loadG;
+
+  return {
+    design,
+    rules,
+    plan,
+    points,
+    phone,
+    detector,
+    dcLoad,
+    audio: load,
+    soundings,
+    audioFigures: audioAt({ design, detector, phone, dcLoad: path, load }, soundings[1]),
+    reach,
+    margins: marginsOf(nominal, band),
+    cornerMargins: marginsOf(reach.corners, band),
+    share,
+    limits,
+    coil,
+  };
+}
