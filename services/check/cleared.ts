@@ -53,7 +53,7 @@ const rules: readonly Rule[] = [
     codes: ['BAND-YIELD', 'BAND-LOW', 'BAND-HIGH'],
     title: 'Tried boxes that reach both ends',
     says: ({ share }) =>
-      share.covered === null || share.low === null
+      share === null
         ? null
         : {
             text: `At least ${percent(share.low)} of all boxes is sure.`,

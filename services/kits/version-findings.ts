@@ -39,6 +39,10 @@ function guideMiss({ guide, lines }: VersionContent): Finding | null {
 /** Lines a builder fits into the set, so that a step of the guide has to name them. */
 const isBuiltIn = (line: FrozenLine) => !['tool', 'print', 'packaging'].includes(line.place);
 
+/** Two ends of 150 mm, and a loop of 80 mm a tap: metres (common practice; coils-and-capacitors, D). */
+const LEADS = 0.3;
+const TAP_LOOP = 0.08;
+
 /** Metres of wire that the winding takes with its tails and taps; null while the coil is not chosen. */
 export function wireNeeded(content: Pick<VersionContent, 'lines' | 'circuit'>): number | null {
   const former = valuesAt(content, 'tuning coil', 'coil-former');
@@ -51,7 +55,9 @@ export function wireNeeded(content: Pick<VersionContent, 'lines' | 'circuit'>): 
     diameter: former.outerDiameter.nominal + overall,
     // A winding by hand takes 3 % more than wire laid side by side (coils-and-capacitors, J).
     pitch: winding.pitch ?? 1.03 * overall,
+    leads: LEADS,
     taps: [winding.aerialTap, winding.detectorTap].filter((tap) => tap !== null).length,
+    tapLoop: TAP_LOOP,
   });
 }
 

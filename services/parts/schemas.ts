@@ -174,8 +174,8 @@ export type Silhouette =
   | 'coil-tube'
   | 'reel'
   | 'vanes'
-  | 'foil'
-  | 'capacitor'
+  | 'foil-plates'
+  | 'fixed-capacitor'
   | 'resistor'
   | 'detector'
   | 'earpiece'
@@ -205,12 +205,17 @@ export const partKinds: Record<PartKind, KindEntry> = {
     places: ['tuning capacitor'],
     silhouette: 'vanes',
   },
-  'foil-capacitor': { label: 'Foil capacitor set', unit: 'each', places: ['tuning capacitor'], silhouette: 'foil' },
+  'foil-capacitor': {
+    label: 'Foil capacitor set',
+    unit: 'each',
+    places: ['tuning capacitor'],
+    silhouette: 'foil-plates',
+  },
   'fixed-capacitor': {
     label: 'Fixed capacitor',
     unit: 'each',
     places: ['coupling capacitor', 'bypass capacitor'],
-    silhouette: 'capacitor',
+    silhouette: 'fixed-capacitor',
   },
   resistor: { label: 'Resistor', unit: 'each', places: ['return resistor'], silhouette: 'resistor' },
   detector: { label: 'Detector', unit: 'each', places: ['detector'], silhouette: 'detector' },

@@ -18,10 +18,10 @@ export async function listParts(actor: Actor, input: ListParts = {}): Promise<Pa
   if (kind) query.where('parts.kind', kind);
   if (place) query.whereIn('parts.kind', kindsAt(place));
   if (after) query.where('parts.code', '>', after);
-  for (const word of (q ?? '').split(/\s+/).filter((one) => one !== '')) {
-    query.where((either) =>
-      either.whereLike('parts.code', containing(word)).orWhereLike('parts.name', containing(word)),
-    );
+  const words = wordsOf(q);
+  if (words === null) return { parts: [], next: null };
+  for (const word of words) {
+    query.where((either) => either.whereLike('parts.code', `%${word}%`).orWhereLike('parts.name', `%${word}%`));
   }
   const rows: StockedRow[] = await query;
   const page = rows.slice(0, PAGE).map((row) => viewOf(partOf(row), stockOf(row)));
@@ -99,5 +99,8 @@ export const viewOf = (part: Part, stock: Stock): PartView => ({
   stock,
 });
 
-/** A LIKE pattern; wildcards that were typed lose their meaning by becoming one-character blanks. */
-const containing = (word: string) => `%${word.replace(/[%_\\]/g, '_')}%`;
+/** The words to look for, all of them; LIKE's wildcards part words like blanks. Null when only such signs were typed. */
+function wordsOf(q = ''): string[] | null {
+  const words = q.split(/[\s%_]+/).filter((word) => word !== '');
+  return q.trim() !== '' && words.length === 0 ? null : words;
+}
