@@ -138,7 +138,7 @@ export const demoKits: DemoKit[] = [
           ...shortWire,
           former: 'F-50T',
           wire: 'W-500',
-          turns: 54,
+          turns: 60,
           capacitor: 'C-220',
           couplingCapacitor: 'CC-15',
           earphone: 'E-DY1',
@@ -154,7 +154,7 @@ export const demoKits: DemoKit[] = [
           ...shortWire,
           former: 'F-50T',
           wire: 'W-500',
-          turns: 54,
+          turns: 60,
           capacitor: 'C-220',
           couplingCapacitor: 'CC-15',
         },
@@ -176,7 +176,7 @@ export const demoKits: DemoKit[] = [
     pence: 6400,
     versions: [
       {
-        set: { ...ebbLamp, former: 'F-90T', wire: 'W-315', turns: 210, capacitor: 'C-500', couplingCapacitor: 'CC-33' },
+        set: { ...ebbLamp, former: 'F-90T', wire: 'W-315', turns: 222, capacitor: 'C-500', couplingCapacitor: 'CC-33' },
         fate: 'released',
         by: 'Isolde Hark',
       },
