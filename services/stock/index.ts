@@ -6,4 +6,5 @@ export { pick, putBack } from './pick';
 export { receiveLot } from './receive-lot';
 export { reserve } from './reserve';
 export { takeOut } from './take-out';
+export { findLot, liveReservation } from './rows';
 export { availableOf, buildable, needsOf, readStore, suggestLots } from './views';

@@ -1,4 +1,4 @@
-import type { Tx } from '../record';
+import { type Tx, record } from '../record';
 import * as rows from './rows';
 
 /**
@@ -19,6 +19,11 @@ export async function release(tx: Tx, reservation: rows.Reservation, to: 'lapsed
   for (const [partId, quantity] of await rows.reservationLines(tx.sql, id)) {
     if (quantity > 0) await rows.changeStock(tx.sql, partId, { [state]: -quantity });
   }
+  await record(tx, `stock.${to}`, {
+    subject: { kind: 'order', id: reservation.orderId },
+    before: { stock: state },
+    after: { stock: to },
+  });
 }
 
 /** Gives an order's stock back: its reservation when payment did not come, its allocation when it is cancelled. */

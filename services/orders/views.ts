@@ -1,0 +1,138 @@
+import type { Knex } from 'knex';
+import { type Actor, can, must } from '../access';
+import { OrderId } from '../ids';
+import { type Money, money, times } from '../money';
+import { missing, parse } from '../problem';
+import { reading } from '../record';
+import { boxesOf, packingTimes } from './box-rows';
+import { orderLink } from './link';
+import { openOrder, ownership } from './order-access';
+import { lastEventOf, shipmentsOf } from './order-facts';
+import * as rows from './rows';
+import { headlineOf, mayCancel, mayPay, timelineOf } from './rules';
+import { Invoice, OrderRef, OrderView } from './schemas';
+
+/** One order as its buyer, or somebody of the yard, sees it. */
+export async function readOrder(actor: Actor, input: OrderRef): Promise<OrderView> {
+  const ref = parse(OrderRef, input);
+  const sql = reading();
+  const order = await openOrder(sql, actor, 'order.read', ref);
+  const owned = ownership(order, ref.key);
+  const [lines, boxes, shipments, deliveries, cash, invoice, lastEvent] = [
+    await rows.linesOf(sql, order.id),
+    await boxesOf(sql, order.id),
+    await shipmentsOf(sql, order.id),
+    await rows.deliveries(sql),
+    await rows.moneyOf(sql, order.id),
+    await invoiceOf(sql, order.id),
+    await lastEventOf(sql, order.id),
+  ];
+  const method = deliveries.find((one) => one.code === order.deliveryCode);
+  const promise = method?.promise ?? 'a few working days';
+  const facts = {
+    payment: order.payment,
+    fulfilment: order.fulfilment,
+    paidAt: order.paidAt,
+    ...(await packingTimes(sql, order.id)),
+    shippedAt: order.shippedAt,
+    promise,
+    boxes: {
+      all: boxes.length,
+      closed: boxes.filter((box) => box.state === 'closed' || box.state === 'shipped').length,
+    },
+    tracking: shipments[0] ? `${shipments[0].carrier}, ${shipments[0].trackingNumber}` : null,
+  };
+  return OrderView.parse({
+    id: order.id,
+    number: order.number,
+    email: order.email,
+    name: order.name,
+    address: order.address,
+    giftNote: order.giftNote,
+    delivery: { code: order.deliveryCode, name: method?.name ?? order.deliveryCode, promise },
+    payment: order.payment,
+    fulfilment: order.fulfilment,
+    placedAt: order.placedAt,
+    paidAt: order.paidAt,
+    shippedAt: order.shippedAt,
+    lines: lines.map(({ versionId, code, kitNumber, name, letter, quantity, unitMinor }) => {
+      const unit = money(unitMinor, order.currency);
+      return { versionId, code, number: kitNumber, name, letter, quantity, unit, total: times(unit, quantity) };
+    }),
+    linesTotal: order.lines,
+    deliveryPrice: order.delivery,
+    tax: order.tax,
+    taxBasisPoints: order.taxBasisPoints,
+    total: order.total,
+    paid: money(cash.paidMinor, order.currency),
+    refunded: money(cash.refundedMinor, order.currency),
+    ...headlineOf(facts),
+    timeline: timelineOf(facts),
+    boxes,
+    invoice,
+    shipments,
+    bankSaidNo: order.payment === 'awaiting-payment' && lastEvent === 'payment_intent.payment_failed',
+    may: {
+      pay: mayPay(order) && can(actor, 'order.pay', owned),
+      cancel: mayCancel(order) && can(actor, 'order.cancel', owned),
+      claim: order.customerId === null && owned.holdsLink && can(actor, 'order.claim', owned),
+    },
+    lookAtIt: can(actor, 'order.list') && order.lookAtIt !== '' ? order.lookAtIt : null,
+  });
+}
+
+async function invoiceOf(sql: Knex, orderId: string): Promise<{ id: string; number: number } | null> {
+  const row = await sql('invoices')
+    .where({ order_id: orderId })
+    .select('id', 'number')
+    .first<{ id: string; number: number } | undefined>();
+  return row ?? null;
+}
+
+/** An issued invoice as it was frozen, for its buyer or the owner. */
+export async function readInvoice(
+  actor: Actor,
+  input: { invoiceId: string; key?: string | undefined },
+): Promise<Invoice> {
+  const sql = reading();
+  const row = await sql('invoices')
+    .where({ id: input.invoiceId })
+    .select({ orderId: 'order_id', content: 'content' })
+    .first<{ orderId: string; content: string } | undefined>();
+  if (!row) throw missing('There is no invoice here for you. Open it from the order it belongs to.');
+  const ref = { orderId: OrderId.parse(row.orderId), ...(input.key !== undefined && { key: input.key }) };
+  await openOrder(sql, actor, 'paper.invoice', ref);
+  return Invoice.parse(JSON.parse(row.content));
+}
+
+export interface OrderForMail {
+  number: string;
+  email: string;
+  name: string;
+  lines: { name: string; letter: string; quantity: number; unit: Money }[];
+  total: Money;
+  link: string;
+  shipment?: { carrier: string; trackingNumber: string };
+}
+
+/** What a mail about an order says, read fresh when the mail is written. */
+export async function readOrderForMail(actor: Actor, orderId: string): Promise<OrderForMail> {
+  must(actor, 'mail.send');
+  const sql = reading();
+  const order = await rows.getOrder(sql, orderId);
+  const shipment = (await shipmentsOf(sql, orderId)).at(-1);
+  return {
+    number: order.number,
+    email: order.email,
+    name: order.name,
+    lines: (await rows.linesOf(sql, orderId)).map(({ name, letter, quantity, unitMinor }) => ({
+      name,
+      letter,
+      quantity,
+      unit: money(unitMinor, order.currency),
+    })),
+    total: order.total,
+    link: orderLink(orderId),
+    ...(shipment && { shipment: { carrier: shipment.carrier, trackingNumber: shipment.trackingNumber } }),
+  };
+}
