@@ -26,8 +26,8 @@ const tones: Record<PrintScheme, Record<Tone, string>> = {
   copper: { ...ink, copper: '#b4602b', 'copper-lite': '#d98a52', 'copper-deep': '#8f4519' },
 };
 
-/** Family names as the documents register them, from templates/fonts. */
-const faces = { text: 'Atkinson', figures: 'Martian', display: 'Besley' } as const;
+/** Family names as the documents register them, from templates/fonts; the Greek subset takes Ω, μ and π. */
+const faces = { text: ['Atkinson', 'Greek'], figures: ['Martian', 'Greek'], display: ['Besley', 'Greek'] };
 
 export type PdfDrawingProps = {
   drawing: Drawing;
