@@ -1,15 +1,8 @@
-import { z } from 'zod';
+import { Address } from '../orders/schemas';
 
-/** As the order keeps it: what the buyer typed, in lines, and the country as two letters. */
-const StoredAddress = z.object({
-  lines: z.array(z.string()),
-  town: z.string().default(''),
-  postcode: z.string().default(''),
-  country: z.string().default(''),
-});
-
-/** The lines of a label, top to bottom, without empty ones. */
+/** The lines of a label, top to bottom, without empty ones; the country stands alone on the last. */
 export function addressLines(stored: string): string[] {
-  const { lines, town, postcode, country } = StoredAddress.parse(JSON.parse(stored));
-  return [...lines, [town, postcode].filter((part) => part !== '').join(', '), country].filter((line) => line !== '');
+  const { line1, line2, town, postcode, country } = Address.parse(JSON.parse(stored));
+  const place = [town, postcode].filter((part) => part !== '').join(', ');
+  return [line1, line2, place, country].filter((line) => line !== '');
 }

@@ -3,7 +3,7 @@ import { type Actor, personIdOf } from '../access';
 import { frozenContent } from '../kits';
 import type { Instant } from '../time';
 import { type BoxLineRow, type BoxRow, type InBox, type LotOfPart, getBox, inBox, linesOf, lotsOf } from './rows';
-import { amountText, claimLapsed, closeBlockers, countPieces, isIn, suggest, versionBar, weighing } from './rules';
+import { amountText, claimLapsed, closeBlockers, countPieces, isIn, suggest, barOf, weighing } from './rules';
 import type { BoxCard, BoxView, TrayPlace } from './schemas';
 import { guideCode, shortHash } from './serial';
 
@@ -55,7 +55,7 @@ export function blockersOf(
   const blocked = picked.filter((pick) => pick.lotState !== 'accepted');
   return closeBlockers({
     state: box.state,
-    bar: versionBar(box.versionState, box),
+    bar: barOf(box),
     lines,
     blockedLots: blocked.map((pick) => ({ lotCode: pick.lotCode, name: pick.name })),
     slipPrintedAt: box.slipPrintedAt,

@@ -2,7 +2,7 @@ import { type Actor, must, personIdOf } from '../access';
 import { parse, refused } from '../problem';
 import { record, write } from '../record';
 import { claim, getBox, moveOrder } from './rows';
-import { takenSentence, versionBar } from './rules';
+import { takenSentence, barOf } from './rules';
 import { type BoxView, ClaimBox } from './schemas';
 import { boxView } from './box-view';
 
@@ -16,7 +16,7 @@ export async function claimBox(actor: Actor, input: ClaimBox): Promise<BoxView> 
 
   return write(actor, async (tx) => {
     const box = await getBox(tx.sql, boxId);
-    const bar = versionBar(box.versionState, box);
+    const bar = barOf(box);
     if (bar !== '') throw refused(bar);
     if (!['allocated', 'picking', 'packed'].includes(box.fulfilment)) {
       throw refused(`Order ${box.orderNumber} is ${box.fulfilment}, so its boxes stay empty. Take the next one.`);

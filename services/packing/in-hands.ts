@@ -2,7 +2,7 @@ import { personIdOf } from '../access';
 import { refused } from '../problem';
 import type { Tx } from '../record';
 import { type BoxRow, getBox, keepClaim } from './rows';
-import { takenSentence, versionBar } from './rules';
+import { takenSentence, barOf } from './rules';
 
 /**
  * A step: the box, when the acting packer has it in hand; each thing done keeps the claim alive. Refused for a closed
@@ -21,7 +21,7 @@ export async function boxInHands(tx: Tx, boxId: string): Promise<BoxRow> {
         : `Take box ${box.serial} first: press "Pack this box".`,
     );
   }
-  const bar = versionBar(box.versionState, box);
+  const bar = barOf(box);
   if (bar !== '') throw refused(bar);
   return box;
 }

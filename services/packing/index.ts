@@ -1,5 +1,5 @@
 import 'server-only';
-export { boxesOfOrder } from './boxes-of-order';
+export { type BoxPaper, type BoxPapers, readBoxPapers } from './box-papers';
 export { claimBox } from './claim-box';
 export { closeBox } from './close-box';
 export { readDispatch } from './dispatch';

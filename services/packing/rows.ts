@@ -19,6 +19,7 @@ export interface BoxRow {
   paidAt: Instant | null;
   placedAt: Instant;
   fulfilment: Fulfilment;
+  payment: string;
   versionId: VersionId;
   kitNumber: number;
   kitCode: string;
@@ -58,6 +59,7 @@ export const boxes = (sql: Knex) =>
       paidAt: 'orders.paid_at',
       placedAt: 'orders.placed_at',
       fulfilment: 'orders.fulfilment',
+      payment: 'orders.payment',
       versionId: 'boxes.version_id',
       kitNumber: 'kits.number',
       kitCode: 'kits.code',
@@ -80,8 +82,12 @@ export const boxes = (sql: Knex) =>
     })
     .select(sql('boxes as siblings').count('*').where('siblings.order_id', sql.ref('boxes.order_id')).as('of'));
 
+export async function findBox(sql: Knex, boxId: string): Promise<BoxRow | undefined> {
+  return boxes(sql).where('boxes.id', boxId).first();
+}
+
 export async function getBox(sql: Knex, boxId: string): Promise<BoxRow> {
-  const row = await boxes(sql).where('boxes.id', boxId).first();
+  const row = await findBox(sql, boxId);
   if (!row) throw missing('There is no such box. Look for it under Boxes, or scan its serial under Trace.');
   return row;
 }
@@ -194,6 +200,8 @@ export interface InBox {
   binId: BinId;
   name: string;
   quantity: number;
+  /** When the last piece of it was scanned. */
+  at: Instant;
 }
 
 /** What lies in a box, the last picked first. */
@@ -211,6 +219,7 @@ export async function inBox(sql: Knex, boxId: string): Promise<InBox[]> {
       binId: 'box_picks.bin_id',
       name: 'parts.name',
       quantity: 'box_picks.quantity',
+      at: 'box_picks.at',
     });
   const sums = new Map<string, InBox>();
   for (const pick of picks) {

@@ -23,13 +23,26 @@ const packingMoves: Partial<Record<Fulfilment, readonly Fulfilment[]>> = {
 
 export const mayMove = (from: Fulfilment, to: Fulfilment) => packingMoves[from]?.includes(to) ?? false;
 
-/** Why a box of this version may not be packed or sent; empty when it may. */
-export function versionBar(state: VersionState, plate: { kitNumber: number; letter: string }): string {
-  if (state === 'released') return '';
-  const name = versionName(plate);
-  return state === 'withdrawn'
-    ? `Version ${name} was withdrawn, so nobody packs or sends it. Ask the owner what the buyer gets.`
-    : `Version ${name} is not released, so nobody packs or sends it. Tell the owner.`;
+interface Barred {
+  versionState: VersionState;
+  kitNumber: number;
+  letter: string;
+  payment: string;
+  orderNumber: string;
+}
+
+/** Why a box may be neither packed nor sent, its version or its order being what they are; empty when it may. */
+export function barOf(box: Barred): string {
+  const name = versionName(box);
+  if (box.versionState === 'withdrawn') {
+    return `Version ${name} was withdrawn, so nobody packs or sends it. Ask the owner what the buyer gets.`;
+  }
+  if (box.versionState !== 'released')
+    return `Version ${name} is not released, so nobody packs or sends it. Tell the owner.`;
+  if (box.payment !== 'paid' && box.payment !== 'part-refunded') {
+    return `Order ${box.orderNumber} is not paid any more, so nobody packs or sends it. Ask the owner.`;
+  }
+  return '';
 }
 
 export const versionName = (plate: { kitNumber: number; letter: string }) => `${plate.kitNumber} ${plate.letter}`;

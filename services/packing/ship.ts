@@ -4,7 +4,7 @@ import { queue } from '../mail';
 import { parse, refuseIfAny, refused } from '../problem';
 import { record, write } from '../record';
 import { boxesOf, insertShipment, moveOrder } from './rows';
-import { versionBar } from './rules';
+import { barOf } from './rules';
 import { Ship } from './schemas';
 
 /** Hands an order to the carrier: all its boxes closed, one parcel, and the buyer is told in the same transaction. */
@@ -17,7 +17,7 @@ export async function ship(actor: Actor, input: Ship): Promise<{ shipmentId: str
     const [first] = packed;
     if (!first) throw refused('This order has no boxes yet. Look for it under Boxes.');
     const open = packed.filter((box) => box.state !== 'closed' && box.state !== 'shipped');
-    const bars = new Set(packed.map((box) => versionBar(box.versionState, box)).filter((bar) => bar !== ''));
+    const bars = new Set(packed.map((box) => barOf(box)).filter((bar) => bar !== ''));
     refuseIfAny([
       ...(open.length > 0 ? [`Not closed yet: ${open.map((box) => box.serial).join(', ')}.`] : []),
       ...bars,

@@ -5,7 +5,7 @@ import type { Instant } from '../time';
 import { boxView, claimOf, plateOf } from './box-view';
 import { prepareBoxes } from './make-boxes';
 import { type BoxLineRow, type BoxRow, boxes, linesOf } from './rows';
-import { countPieces, dispatchDue, versionBar } from './rules';
+import { countPieces, dispatchDue, barOf } from './rules';
 import type { BoxCard, BoxView } from './schemas';
 
 /** Most boxes that one screen lists; the oldest come first, so the rest waits its turn. */
@@ -61,7 +61,7 @@ export async function cardsOf(sql: Knex, actor: Actor, rows: readonly BoxRow[], 
       paidAt,
       dueAt: dispatchDue(paidAt),
       claim: claimOf(row, actor, at),
-      barred: versionBar(row.versionState, row),
+      barred: barOf(row),
     };
   });
 }

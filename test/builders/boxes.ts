@@ -367,7 +367,8 @@ export async function paidOrder(
     name: more.name ?? 'Hollin Road Radio Club',
     link_hash: sha256(linkKey),
     address: JSON.stringify({
-      lines: ['The Old Drill Hall', 'Hollin Road'],
+      line1: 'The Old Drill Hall',
+      line2: 'Hollin Road',
       town: 'Osk Bridge',
       postcode: 'OB4 2HR',
       country: 'GB',

@@ -3,13 +3,13 @@ import { describe, expect, it } from 'vitest';
 import type { VersionContent } from '@/services/kits/schemas';
 import {
   amountText,
+  barOf,
   closeBlockers,
   countPieces,
   expectedMass,
   massLimits,
   mayMove,
   suggest,
-  versionBar,
   weighing,
 } from '@/services/packing/rules';
 import type { LotPlace } from '@/services/packing/schemas';
@@ -122,10 +122,18 @@ describe('closing a box', () => {
     ]);
   });
 
-  it('is refused for a version that was withdrawn', () => {
-    expect(versionBar('released', { kitNumber: 4, letter: 'F' })).toBe('');
-    expect(versionBar('withdrawn', { kitNumber: 4, letter: 'F' })).toContain('4 F was withdrawn');
-    expect(versionBar('held', { kitNumber: 4, letter: 'F' })).toContain('not released');
+  it('is refused for a version that was withdrawn, and for an order that was paid back', () => {
+    const box = {
+      versionState: 'released',
+      kitNumber: 4,
+      letter: 'F',
+      payment: 'paid',
+      orderNumber: 'Y-4127',
+    } as const;
+    expect(barOf(box)).toBe('');
+    expect(barOf({ ...box, versionState: 'withdrawn' })).toContain('4 F was withdrawn');
+    expect(barOf({ ...box, versionState: 'held' })).toContain('not released');
+    expect(barOf({ ...box, payment: 'refunded' })).toContain('Order Y-4127 is not paid any more');
   });
 });
 
