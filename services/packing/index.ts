@@ -1,5 +1,6 @@
 import 'server-only';
 export { type BoxPaper, type BoxPapers, readBoxPapers } from './box-papers';
+export { boxesOfOrder } from './boxes-of-order';
 export { claimBox } from './claim-box';
 export { closeBox } from './close-box';
 export { readDispatch } from './dispatch';
