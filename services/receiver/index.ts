@@ -1,3 +1,4 @@
+export { asText } from './as-text';
 export { BANDS, bandOf, carrierCount, nearestCarrier, nthCarrier, type BandEntry } from './bands';
 export { dialLabels, labelsThatFit, type DialMark, type DialRoom } from './capacitors/dial';
 export { gang, type Gang, type GangLaw, type GangShape } from './capacitors/gang';

@@ -1,5 +1,6 @@
 import { positive } from '../invalid-input';
 import type { Henry, Metre } from '../units';
+import { WHEELER } from './nagaoka';
 import { loopsInductance, type Loops } from './loops';
 
 export interface MultilayerShape {
@@ -39,5 +40,5 @@ export function multilayer(shape: MultilayerShape): Henry {
 
 /** Quick check, +-4 %. */
 export function multilayerWheeler(turns: number, meanRadius: Metre, length: Metre, depth: Metre): Henry {
-  return (3.1496e-5 * meanRadius * meanRadius * turns * turns) / (6 * meanRadius + 9 * length + 10 * depth);
+  return (0.8 * WHEELER * meanRadius * meanRadius * turns * turns) / (6 * meanRadius + 9 * length + 10 * depth);
 }

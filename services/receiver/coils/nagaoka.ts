@@ -66,8 +66,11 @@ export function sheetInductance(turns: number, diameter: Metre, length: Metre): 
   return (MU_0 * PI * turns * turns * diameter * diameter * nagaoka(diameter, length)) / (4 * length);
 }
 
+/** Wheeler's microhenry for inches, in SI: 1e-6 over 0.0254. */
+export const WHEELER = 1e-6 / 0.0254;
+
 /** Wheeler's form of 1928, +-0.6 % for length over diameter above 0.4: a quick check. */
 export function wheelerInductance(turns: number, diameter: Metre, length: Metre): Henry {
   const a = positive('diameter', diameter) / 2;
-  return (3.93701e-5 * a * a * turns * turns) / (9 * a + 10 * positive('length', length));
+  return (WHEELER * a * a * turns * turns) / (9 * a + 10 * positive('length', length));
 }

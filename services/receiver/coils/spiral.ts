@@ -1,6 +1,7 @@
 import { positive } from '../invalid-input';
 import { log } from '../numeric/exp-log';
-import type { Henry, Metre } from '../units';
+import { MU_0, type Henry, type Metre } from '../units';
+import { WHEELER } from './nagaoka';
 import { loopsInductance, type Loops } from './loops';
 
 export interface SpiralShape {
@@ -46,7 +47,7 @@ export function spiral(shape: SpiralShape): Henry {
 export function spiralWheeler({ turns, innerDiameter, pitch }: Omit<SpiralShape, 'wireBare'>): Henry {
   const depth = turns * pitch;
   const mean = innerDiameter / 2 + depth / 2;
-  return (3.93701e-5 * mean * mean * turns * turns) / (8 * mean + 11 * depth);
+  return (WHEELER * mean * mean * turns * turns) / (8 * mean + 11 * depth);
 }
 
 /** Quick check by the current sheet of Mohan, +-1 %. */
@@ -54,5 +55,5 @@ export function spiralMohan({ turns, innerDiameter, pitch }: Omit<SpiralShape, '
   const outer = innerDiameter + 2 * turns * pitch;
   const mean = (outer + innerDiameter) / 2;
   const fill = (outer - innerDiameter) / (outer + innerDiameter);
-  return (1.2566370614359173e-6 * turns * turns * mean * (log(2.46 / fill) + 0.2 * fill * fill)) / 2;
+  return (MU_0 * turns * turns * mean * (log(2.46 / fill) + 0.2 * fill * fill)) / 2;
 }

@@ -37,10 +37,16 @@ interface EnamelRow {
   grade2: readonly [increase: number, overall: number];
 }
 
-/** Metric sizes, millimetre: bare, tolerance, least increase and greatest overall diameter of grades 1 and 2. */
+/**
+ * Metric sizes, millimetre: bare, tolerance, least increase and greatest overall diameter of grades 1 and 2. The least
+ * increases of 0.112, 0.132 and 0.14 are interpolated; their overall diameters were read.
+ */
 const ENAMEL: readonly EnamelRow[] = [
   { bare: 0.1, tolerance: 0.003, grade1: [0.008, 0.117], grade2: [0.016, 0.125] },
+  { bare: 0.112, tolerance: 0.003, grade1: [0.00896, 0.13], grade2: [0.01744, 0.139] },
   { bare: 0.125, tolerance: 0.003, grade1: [0.01, 0.144], grade2: [0.019, 0.154] },
+  { bare: 0.132, tolerance: 0.003, grade1: [0.0104, 0.152], grade2: [0.0198, 0.162] },
+  { bare: 0.14, tolerance: 0.003, grade1: [0.01086, 0.16], grade2: [0.02071, 0.171] },
   { bare: 0.16, tolerance: 0.003, grade1: [0.012, 0.182], grade2: [0.023, 0.194] },
   { bare: 0.2, tolerance: 0.003, grade1: [0.014, 0.226], grade2: [0.027, 0.239] },
   { bare: 0.25, tolerance: 0.004, grade1: [0.017, 0.281], grade2: [0.032, 0.297] },

@@ -24,7 +24,6 @@ const USUAL: Record<string, Usual> = {
 };
 
 const VARIABLE: Usual = { unit: 'H', least: 20e-6, most: 5e-3 };
-const LOAD: Usual = { unit: 'ohm', least: 5e3, most: 1e6 };
 const EMF: Usual = { unit: 'V', least: 1e-3, most: 1 };
 
 /** Fields inside their limits but outside the usual magnitudes: often a slip of the unit. */
@@ -40,7 +39,6 @@ export function unusual({ plan, design, soundings: [, middle] }: Figures): Found
     const usual = variable ? VARIABLE : USUAL[path];
     if (usual !== undefined) look(path, centre, usual);
   }
-  look('detector', middle.inputR, LOAD);
   if (design.place !== undefined)
     look('place.field', fieldAt(design) * Math.abs(aerialHeight(plan.circuit, middle.f)), EMF);
   return found;
