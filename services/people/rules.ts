@@ -83,7 +83,8 @@ export function passwordFault(
 /** "123456789", "abcdefgh", "987654": each character next to the one before. */
 function isRun(text: string): boolean {
   const steps = [...text].slice(1).map((character, index) => character.charCodeAt(0) - text.charCodeAt(index));
-  return steps.every((step) => step === 1) || steps.every((step) => step === -1);
+  // Nought follows nine on every keyboard.
+  return steps.every((step) => step === 1 || step === -9) || steps.every((step) => step === -1 || step === 9);
 }
 
 /** After the third failure each further one doubles the wait, from a second to a quarter of an hour. Never for good. */

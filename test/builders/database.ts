@@ -16,7 +16,7 @@ export interface TestDatabase {
   readonly sql: Knex;
   readonly filename: string;
   /** A second connection to the same file, as another process would hold. Closed when the test file ends. */
-  openAnother(): Knex;
+  openAnother(options?: { busyTimeoutMs?: number }): Knex;
 }
 
 /**
@@ -52,8 +52,8 @@ export function testDatabase(): TestDatabase {
     get filename() {
       return filename();
     },
-    openAnother() {
-      const another = openDatabase(filename(), { busyTimeoutMs: 250, acquireTimeoutMs: 2000 });
+    openAnother({ busyTimeoutMs = 250 } = {}) {
+      const another = openDatabase(filename(), { busyTimeoutMs, acquireTimeoutMs: 2000 });
       others.push(another);
       return another;
     },
