@@ -33,7 +33,7 @@ const letters: Record<NonNullable<PlateProps['size']>, string> = {
 export function Plate({ kit, version, size = 'page', className }: PlateProps) {
   const said = version === undefined ? `Kit number ${kit}` : `Kit number ${kit}, version ${version}`;
   return (
-    <span className={classes('inline-flex shrink-0 items-center whitespace-nowrap', frames[size], className)}>
+    <span className={classes('inline-flex w-fit shrink-0 items-center whitespace-nowrap', frames[size], className)}>
       {size !== 'print' && <Rivets near={size === 'row'} />}
       <span className="sr-only">{said}</span>
       <span aria-hidden className={classes('font-display', names[size])}>

@@ -3,7 +3,7 @@ import { Rivets } from './plate';
 /** The house plate. Put it in a link that says where it goes. */
 export function Wordmark({ small = false }: { small?: boolean }) {
   return (
-    <span className="plate-frame inline-flex shrink-0 items-center px-5.5 pt-2 pb-2.25">
+    <span className="plate-frame inline-flex w-fit shrink-0 items-center px-5.5 pt-2 pb-2.25">
       <Rivets />
       <span
         className={`font-display ${small ? 'text-[19px] leading-6' : 'text-[19px] leading-6 sm:text-[22px] sm:leading-6.5'}`}

@@ -6,6 +6,7 @@ import { cardDrawing, posterDrawing, stageDrawing, type KitLook } from '@/templa
 import { isPartFamily, partDrawing, partFamilies } from '@/templates/drawings/part-drawing';
 import { hatched } from '@/templates/drawings/reach-rail-drawing';
 import type { Drawing, Shape } from '@/templates/drawings/shapes';
+import { dialDrawing, foilTemplate, formerTemplate, pointsOf } from '@/templates/drawings/true-scale';
 import { windingDrawing, windingSentence, type WindingView } from '@/templates/drawings/winding-drawing';
 
 const tube: WindingView = {
@@ -51,10 +52,27 @@ const turnsOf = (drawing: Drawing) =>
     (shape) => shape.kind === 'path' && shape.stroke?.startsWith('copper') && / 0 0 1 /.test(shape.d),
   ).length;
 
+const dial = dialDrawing({
+  diameterMm: 90,
+  shaftMm: 6,
+  unit: 'kHz',
+  marks: [0, 30, 60, 90, 120, 150, 180].map((angle, index) => ({
+    angle,
+    label: index % 2 === 0 ? String(500 + angle * 6) : null,
+  })),
+  stations: [
+    { name: 'Vale', angle: 40 },
+    { name: 'Cape', angle: 160 },
+  ],
+});
+
 const everything: [string, Drawing][] = [
   ...partFamilies.filter(isPartFamily).map((family): [string, Drawing] => [family, partDrawing(family)]),
   ['winding', windingDrawing(tube)],
   ['circuit', circuitDrawing(circuit)],
+  ['former', formerTemplate({ spokes: 13, diameterMm: 120, innerMm: 36, slotMm: 1.6 })],
+  ['foil', foilTemplate({ widthMm: 120, heightMm: 80, tagMm: 12, plates: 2 })],
+  ['dial', dial],
   ...kits.flatMap((kit, index): [string, Drawing][] => [
     [`poster ${index}`, posterDrawing(kit)],
     [`stage ${index}`, stageDrawing(kit, { callouts: true })],
@@ -137,6 +155,22 @@ describe('a circuit drawing', () => {
         expect(shape.x).toBeLessThanOrEqual(182);
       }
     }
+  });
+});
+
+describe('a template to cut from', () => {
+  it('keeps its millimetres on paper and brings a bar to measure', () => {
+    expect(pointsOf(25.4)).toBe(72);
+    const former = formerTemplate({ spokes: 13, diameterMm: 120, innerMm: 36, slotMm: 1.6 });
+    expect(flat(former.shapes)).toContainEqual(expect.objectContaining({ kind: 'circle', r: 60 }));
+    for (const drawing of [former, dial]) {
+      expect(textsOf(drawing).join()).toContain('This bar is 50 mm long');
+      expect(flat(drawing.shapes).some((shape) => shape.kind === 'path' && shape.d.includes('h50'))).toBe(true);
+    }
+  });
+
+  it('of a dial names its figures and stations', () => {
+    expect(textsOf(dial)).toEqual(expect.arrayContaining(['500', '1580', 'Vale', 'Cape', 'kHz']));
   });
 });
 
