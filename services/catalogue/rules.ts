@@ -1,6 +1,7 @@
 import type { FrozenLine, VersionContent } from '../kits/schemas';
 import { type Currency, type Money, times } from '../money';
-import type { KitShape, PriceStep } from './schemas';
+import type { Verdict } from '../receiver';
+import type { KitShape, PriceStep, Reach } from './schemas';
 
 /** Every price and order of the shop is in this one currency. */
 export const shopCurrency: Currency = 'GBP';
@@ -72,4 +73,15 @@ export function matches(kit: Searchable, q: string): boolean {
 /** Cost of a line at what its part costs a piece, a metre or a gram; quantities of the latter are thousandths. */
 export function lineCost(line: Pick<FrozenLine, 'quantity' | 'part'>, costMinor: number): number {
   return line.part?.unit === 'each' ? line.quantity * costMinor : (line.quantity * costMinor) / 1000;
+}
+
+/** The rail of a version. Its brackets stand at the first and last carrier, which is what a buyer can tune to. */
+export function reachOf(verdict: Pick<Verdict, 'reach'> | null, content: Pick<VersionContent, 'kit'>): Reach | null {
+  if (!verdict) return null;
+  const { firstCarrier, lastCarrier } = content.kit.band;
+  return {
+    band: { lo: firstCarrier, hi: lastCarrier },
+    nominal: verdict.reach.nominal,
+    worst: verdict.reach.corners,
+  };
 }

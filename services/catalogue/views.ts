@@ -3,7 +3,7 @@ import { z } from 'zod';
 import { type Actor, must } from '../access';
 import { readSignOff } from '../check';
 import type { KitId, VersionId } from '../ids';
-import { readFrozen } from '../kits';
+import { readFrozen, storedVerdict } from '../kits';
 import { cautionNote, cautions } from '../kits/cautions';
 import { allFindings, contentMass, findingKey } from '../kits/rules';
 import { type Money, money } from '../money';
@@ -12,9 +12,8 @@ import { reading } from '../record';
 import { buildable } from '../stock';
 import { chanceOf } from './chance';
 import * as rows from './rows';
-import { bandName, lineCost, matches, shapeOf, shopCurrency, unitPrice } from './rules';
+import { bandName, lineCost, matches, reachOf, shapeOf, shopCurrency, unitPrice } from './rules';
 import { type KitCard, KitPage, OnSale, type PriceStep, PricedKit } from './schemas';
-import { reachOf, readVerdict } from './stored-verdict';
 
 const Search = z.strictObject({ q: z.string().trim().max(80).optional() });
 
@@ -46,7 +45,7 @@ async function cardOf(sql: Knex, release: rows.Release, prices: PriceStep[]): Pr
     summary: kit.summary,
     ageFrom: kit.ageFrom,
     bandName: bandName(kit.band),
-    reach: reachOf(readVerdict(verdict), content),
+    reach: reachOf(storedVerdict(verdict), content),
     stations: content.circuit.place.stations.map(({ name, f }) => ({ name, f })),
     shape: shapeOf(content),
     prices,
@@ -133,7 +132,7 @@ export async function listPriced(actor: Actor): Promise<PricedKit[]> {
         name: content.kit.name,
         letter,
         state,
-        reach: reachOf(readVerdict(verdict), content),
+        reach: reachOf(storedVerdict(verdict), content),
         prices: prices.get(kitId) ?? [],
         ready: count,
         limitedBy,
