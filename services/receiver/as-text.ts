@@ -33,7 +33,7 @@ export function asText(verdict: Verdict): string {
     const source =
       sourceR === null || inputR === null
         ? ''
-        : `, source ${shownQuantity(sourceR, 'ohm')}, detector ${shownQuantity(inputR, 'ohm')}`;
+        : `, source ${shownQuantity(sourceR, 'Ω')}, detector ${shownQuantity(inputR, 'Ω')}`;
     lines.push(`At ${shownFrequency(f)}: ${shownQuantity(c, 'F')}${at}${loaded}${source}.`);
   }
   if (detector.relative !== null) lines.push(`Detector: ${shownPercent(detector.relative, 0)} of a germanium diode.`);

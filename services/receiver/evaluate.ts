@@ -32,8 +32,8 @@ export function evaluate(input: DesignInput | unknown, options: EvaluateOptions 
   within('seed', seed, 0, 4294967295);
   within('boxes', boxes, 0, 200000);
   const design = parseDesign(input);
-  const figures = survey(design, { seed, boxes, rules, onProgress });
-  const findings = findingsOf(figures, (found) => remedyFor(found, figures, input));
+  const figures = survey(design, { seed, boxes, rules, onProgress, depth: 'boxes' });
+  const findings = findingsOf(figures, (found, stops) => remedyFor(found, figures, { input, seed, boxes }, stops));
   const stops = findings.some((finding) => finding.severity === 'stop');
   const { audioFigures, detector, reach, margins, share, limits, coil } = figures;
   return {

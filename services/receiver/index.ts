@@ -26,5 +26,7 @@ export { InvalidInput, type Issue } from './invalid-input';
 export { canonicalJson, sha256 } from './numeric/digest';
 export { Rules, rules as defaultRules } from './rules';
 export { centre, type Spread, type Value } from './schema/value';
+export { applyChanges } from './seek/changes';
+export { nearestFix, type Fix, type FixOptions } from './seek/nearest-fix';
 export { Finding, Verdict, type Change, type Point, type Severity } from './verdict';
 export { ENGINE_VERSION } from './version';

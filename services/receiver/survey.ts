@@ -19,9 +19,13 @@ import { loadAt, soundingAt } from './soundings';
 import { TWO_PI } from './units';
 import type { Verdict } from './verdict';
 
+/** Nominal figures alone, with corners and variance shares, or with the boxes as well. */
+export type SurveyDepth = 'nominal' | 'corners' | 'boxes';
+
 export interface SurveyOptions {
+  depth: SurveyDepth;
   seed: number;
-  /** 0 leaves the boxes out. */
+  /** 0 leaves the boxes out as well. */
   boxes: number;
   rules: Rules;
   onProgress?: ((done: number, total: number) => void) | undefined;
@@ -42,10 +46,10 @@ export function prepared(design: Design): Prepared {
   return { plan, points: scanPoints(plan) };
 }
 
-/** Nominal reach of a design alone. */
-export function nominalReach(design: Design): Ends {
+/** Margins of the nominal reach alone. */
+export function nominalMargins(design: Design): Ends {
   const { plan, points } = prepared(design);
-  return reachAsFilled(plan, plan.nominal, points);
+  return marginsOf(reachAsFilled(plan, plan.nominal, points), design.band);
 }
 
 function aerialScaled({ plan, points }: Prepared, scale: number): Ends {
@@ -88,7 +92,7 @@ function coilOf({ plan }: Prepared): Verdict['coil'] {
 }
 
 /** Works out every figure of a design; the findings are made from them. */
-export function survey(design: Design, { seed, boxes, rules, onProgress }: SurveyOptions): Figures {
+export function survey(design: Design, { seed, boxes, rules, depth, onProgress }: SurveyOptions): Figures {
   const ready = prepared(design);
   const { plan, points } = ready;
   const phone = earphoneCircuit(design);
@@ -101,12 +105,15 @@ export function survey(design: Design, { seed, boxes, rules, onProgress }: Surve
   const nominal = reachOf(plan, plan.nominal, points);
   const reach = {
     nominal,
-    corners: cornersOf(plan, points, nominal),
+    corners: depth === 'nominal' ? nominal : cornersOf(plan, points, nominal),
     aerialHalf: aerialScaled(ready, 0.5),
     aerialDouble: aerialScaled(ready, 2),
   };
-  const limits = limitsOf(plan, points);
-  const share = boxes === 0 ? null : boxesOf(plan, { seed, boxes, confidence: rules.yieldConfidence, onProgress });
+  const limits = depth === 'nominal' ? [] : limitsOf(plan, points);
+  const share =
+    depth !== 'boxes' || boxes === 0
+      ? null
+      : boxesOf(plan, { seed, boxes, confidence: rules.yieldConfidence, onProgress });
   plan.fill(plan.nominal);
   const coil = coilOf(ready);
 

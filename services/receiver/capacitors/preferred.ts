@@ -1,4 +1,4 @@
-import { InvalidInput, positive } from '../invalid-input';
+import { positive } from '../invalid-input';
 
 const E24 = [
   1, 1.1, 1.2, 1.3, 1.5, 1.6, 1.8, 2, 2.2, 2.4, 2.7, 3, 3.3, 3.6, 3.9, 4.3, 4.7, 5.1, 5.6, 6.2, 6.8, 7.5, 8.2, 9.1,
@@ -34,8 +34,7 @@ export function nearest(series: SeriesName, value: number): number {
   let best = NaN;
   let distance = Infinity;
   for (const step of [...SERIES[series], 10]) {
-    const digits = Math.round(step * 100);
-    const candidate = power >= 2 ? digits * tenTo(power - 2) : digits / tenTo(2 - power);
+    const candidate = composed(step, power);
     const ratio = candidate > value ? candidate / value : value / candidate;
     if (ratio <= distance) {
       best = candidate;
@@ -45,14 +44,17 @@ export function nearest(series: SeriesName, value: number): number {
   return best;
 }
 
-/** The next preferred value below or above, by steps of the series. */
+/** The next preferred value below or above. */
 export function neighbour(series: SeriesName, value: number, direction: 'up' | 'down'): number {
-  const list = SERIES[series];
-  let candidate = nearest(series, value);
-  for (let i = 0; i < 4; i += 1) {
-    if (direction === 'up' ? candidate > value * (1 + 1e-9) : candidate < value * (1 - 1e-9)) return candidate;
-    const span = direction === 'up' ? 1 + 1.2 / list.length : 1 - 0.8 / list.length;
-    candidate = nearest(series, candidate * span * (direction === 'up' ? 1.02 : 0.98));
-  }
-  throw new InvalidInput([{ path: 'value', message: 'No preferred value lies there.' }]);
+  positive('value', value);
+  const power = Number(value.toExponential().split('e')[1]);
+  const list = [power - 1, power, power + 1].flatMap((at) => SERIES[series].map((step) => composed(step, at)));
+  if (direction === 'up') return list.find((candidate) => candidate > value * (1 + 1e-9)) ?? value;
+  return list.reduce((best, candidate) => (candidate < value * (1 - 1e-9) ? candidate : best), value);
+}
+
+/** A step of a series times a power of ten, put together from whole digits. */
+function composed(step: number, power: number): number {
+  const digits = Math.round(step * 100);
+  return power >= 2 ? digits * tenTo(power - 2) : digits / tenTo(2 - power);
 }

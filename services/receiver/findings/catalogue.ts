@@ -45,7 +45,12 @@ export const CATALOGUE: readonly (readonly [code: string, look: (figures: Figure
   ['UNIT-ODD', unusual],
 ];
 
-/** Every finding of a design, each with what would clear it. */
-export function findingsOf(figures: Figures, remedyOf: (found: Found) => Finding['remedy']): Finding[] {
-  return CATALOGUE.flatMap(([, look]) => look(figures).map((found) => ({ ...found, remedy: remedyOf(found) })));
+/** Every finding of a design, each with what would clear it; the codes that already stop go to the remedy's search. */
+export function findingsOf(
+  figures: Figures,
+  remedyOf: (found: Found, stops: ReadonlySet<string>) => Finding['remedy'],
+): Finding[] {
+  const all = CATALOGUE.flatMap(([, look]) => look(figures));
+  const stops = new Set(all.filter((found) => found.severity === 'stop').map((found) => found.code));
+  return all.map((found) => ({ ...found, remedy: remedyOf(found, stops) }));
 }

@@ -30,7 +30,7 @@ export function directPath({ phone, rules }: Figures): Found[] {
   const message =
     back === null
       ? 'The detector has no path for direct current: the sound stops.'
-      : `The return resistor of ${shownQuantity(back, 'ohm')} is outside ${shownQuantity(rules.returnMin, 'ohm')} to ${shownQuantity(rules.returnMax, 'ohm')}.`;
+      : `The return resistor of ${shownQuantity(back, 'Ω')} is outside ${shownQuantity(rules.returnMin, 'Ω')} to ${shownQuantity(rules.returnMax, 'Ω')}.`;
   const limit = back !== null && back > rules.returnMax ? rules.returnMax : rules.returnMin;
   return [{ code: 'PHONE-DC', severity: 'stop', path: 'returnResistor', value: back, limit, unit: 'ohm', message }];
 }

@@ -31,7 +31,7 @@ export function unusual({ plan, design, soundings: [, middle] }: Figures): Found
   const found: Found[] = [];
   const look = (path: string, value: number, { unit, least, most }: Usual): void => {
     if (value >= least && value <= most) return;
-    const message = `Unusual value: ${path} ${shownQuantity(value, unit)}. Check the unit.`;
+    const message = `Unusual value: ${path} ${shownQuantity(value, unit === 'ohm' ? 'Ω' : unit)}. Check the unit.`;
     found.push({ code: 'UNIT-ODD', severity: 'info', path, value, limit: value < least ? least : most, unit, message });
   };
   for (const { path, centre } of plan.values.entries) {

@@ -38,7 +38,10 @@ export function tuneTo(plan: Plan, f: Hertz): Setting {
   return { position, c };
 }
 
-/** Largest whole number of turns whose needed capacitance lies between the ends; the most turns where none does. */
+/**
+ * Largest whole number of turns whose needed capacitance lies between the ends; the most turns where none does. More
+ * turns need less capacitance, so the largest that still needs cMin is found by halving.
+ */
 export function largestTurns(
   needed: (turns: number) => Farad,
   least: number,
@@ -46,13 +49,15 @@ export function largestTurns(
   cMin: Farad,
   cMax: Farad,
 ): number {
-  for (let turns = most; turns >= least; turns -= 1) {
-    const c = needed(turns);
-    if (c >= cMin && c <= cMax) return turns;
-    // Fewer turns need more capacitance: nothing below can fit once the largest is passed.
-    if (c > cMax) break;
+  if (needed(least) < cMin) return most;
+  let low = least;
+  let high = most + 1;
+  while (high - low > 1) {
+    const middle = Math.floor((low + high) / 2);
+    if (needed(middle) >= cMin) low = middle;
+    else high = middle;
   }
-  return most;
+  return needed(low) <= cMax ? low : most;
 }
 
 /** Step of the derivative in Q, relative. */
