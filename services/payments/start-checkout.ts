@@ -34,7 +34,7 @@ function begin(actor: Actor, ref: OrderRef, afresh: boolean): Promise<PaymentAtt
   return write(actor, (tx) => openAttempt(tx, actor, ref, { afresh }));
 }
 
-/** Only a definite refusal lets a new key be used; after silence the same key has to be asked again. */
+/** Only a definite answer lets a new key be used; after silence the same key has to be asked again. */
 async function ask(attempt: PaymentAttempt): Promise<{ id: string; url: string } | 'refused'> {
   try {
     return await openSession(attempt);
@@ -56,8 +56,11 @@ async function stillOpen(sessionId: string): Promise<string | null> {
   return session.status === 'open' ? session.url : null;
 }
 
+/** A 500 counts: it is repeated under its key for a day, and a page whose address nobody got is paid by nobody. */
 const isRefusal = (error: unknown) =>
-  error instanceof Stripe.errors.StripeInvalidRequestError || error instanceof Stripe.errors.StripeIdempotencyError;
+  error instanceof Stripe.errors.StripeInvalidRequestError ||
+  error instanceof Stripe.errors.StripeIdempotencyError ||
+  (error instanceof Stripe.errors.StripeAPIError && error.statusCode === 500);
 
 const unavailable = () =>
   new Problem(
