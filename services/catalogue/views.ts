@@ -6,8 +6,9 @@ import type { KitId, VersionId } from '../ids';
 import { readFrozen, storedVerdict } from '../kits';
 import { cautionNote, cautions } from '../kits/cautions';
 import { allFindings, contentMass, findingKey } from '../kits/rules';
+import { log } from '../log';
 import { type Money, money } from '../money';
-import { missing, parse, refused } from '../problem';
+import { Problem, missing, parse, refused } from '../problem';
 import { reading } from '../record';
 import { buildable } from '../stock';
 import { chanceOf } from './chance';
@@ -28,8 +29,19 @@ export async function listOnSale(actor: Actor, input: z.input<typeof Search> = {
     releases.map((release) => release.kitId),
   );
   const cards: KitCard[] = [];
-  for (const release of releases) cards.push(await cardOf(sql, release, prices.get(release.kitId) ?? []));
+  for (const release of releases) cards.push(...(await soundCard(sql, release, prices.get(release.kitId) ?? [])));
   return OnSale.parse({ kits: q === '' ? cards : cards.filter((card) => matches(card, q)) });
+}
+
+/** A version that fails its hash is not sold; the other kits still are. */
+async function soundCard(sql: Knex, release: rows.Release, prices: PriceStep[]): Promise<KitCard[]> {
+  try {
+    return [await cardOf(sql, release, prices)];
+  } catch (error) {
+    if (!(error instanceof Problem)) throw error;
+    log().error({ version: release.versionId, error: error.message }, 'a released version is not shown');
+    return [];
+  }
 }
 
 async function cardOf(sql: Knex, release: rows.Release, prices: PriceStep[]): Promise<KitCard> {

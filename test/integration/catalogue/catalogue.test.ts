@@ -61,6 +61,9 @@ describe('the catalogue', () => {
     const content = JSON.stringify({ ...broken.content, letter: 'Y' });
     await reading()('versions').where({ id: broken.versionId }).update({ content });
     await expect(readKitPage(visitor, 'LM11')).rejects.toThrow('no longer matches its hash');
+    const names = (await listOnSale(visitor)).kits.map((card) => card.name);
+    expect(names).toContain('Ebb Lamp');
+    expect(names).not.toContain('Long Meadow');
     await reading()('versions').where({ id: broken.versionId }).update({ state: 'withdrawn' });
   });
 });

@@ -1,0 +1,2 @@
+import 'server-only';
+export { readToday } from './views';
