@@ -2,6 +2,7 @@ import 'server-only';
 export { type BenchKit, type BenchVersion, type VerdictSummary, listVersions, summaryOf } from './bench-list';
 export { createKit } from './create-kit';
 export { JUDGED, evaluateApart } from './evaluate-apart';
+export { evaluateDesign } from './evaluate-design';
 export { type Evaluation } from './evaluation';
 export { freezeVersion, readDraft, setState, thawVersion } from './freeze';
 export { type Frozen, currentRelease, frozenContent, readFrozen } from './frozen';

@@ -1,0 +1,277 @@
+'use client';
+
+import { QueryClient, QueryClientProvider } from '@tanstack/react-query';
+import { useRouter } from 'next/navigation';
+import { type ReactNode, useState, useSyncExternalStore } from 'react';
+import type { Action } from '@/components/forms/action-result';
+import { Button } from '@/components/ui/button';
+import { Notice } from '@/components/ui/notice';
+import { ToastRegion, useToast } from '@/components/ui/toast';
+import type { VersionId } from '@/services/ids';
+import { contentMass, fieldOf, settingsFrom, stopsIn } from '@/services/kits/rules';
+import type { LineView, StartVersion, VersionView } from '@/services/kits/schemas';
+import type { PartView, Place } from '@/services/parts/schemas';
+import type { ProblemView } from '@/services/problem';
+import { ConflictPanel } from './conflict-panel';
+import { FootBar } from './foot-bar';
+import { HeldPanel } from './held-panel';
+import { LinesPane } from './lines-pane';
+import { nextReference, referenceLetters } from './places';
+import { StateNotice } from './state-notice';
+import { useVerdict } from './use-verdict';
+import { VerdictPane } from './verdict-pane';
+import type { TriedRemedy, VerdictAnswer } from './verdict-messages';
+import { headlineOf } from './verdict-words';
+import { VersionHead } from './version-head';
+import { type VersionDeeds, VersionStore } from './version-store';
+
+export interface WorkbenchProps {
+  view: VersionView;
+  /** Who looks may change it; a draft only. */
+  mayEdit: boolean;
+  deeds: VersionDeeds & {
+    sendToCheck: Action<{ versionId: VersionId; basedOn: number }, VersionView>;
+    callBack: Action<{ versionId: VersionId }, VersionView>;
+    startVersion: Action<StartVersion, { versionId: VersionId }>;
+  };
+}
+
+/** One version on one screen: parts and circuit at the left, the live verdict at the right. */
+export function Workbench(props: WorkbenchProps) {
+  const [client] = useState(
+    () => new QueryClient({ defaultOptions: { queries: { retry: 1, refetchOnWindowFocus: false } } }),
+  );
+  return (
+    <QueryClientProvider client={client}>
+      <ToastRegion>
+        <Bench {...props} />
+      </ToastRegion>
+    </QueryClientProvider>
+  );
+}
+
+function Bench({ view, mayEdit, deeds }: WorkbenchProps) {
+  const [store] = useState(() => new VersionStore(view, deeds));
+  const snapshot = useSyncExternalStore(store.subscribe, store.read, store.read);
+  const { answer, trying } = useVerdict(snapshot.content);
+  const [pane, setPane] = useState<'parts' | 'verdict'>('parts');
+  const [problem, setProblem] = useState<ProblemView | null>(null);
+  const [deed, setDeed] = useState<'send' | 'start' | 'back' | null>(null);
+  const say = useToast();
+  const router = useRouter();
+  const { server, content, lines, save, conflict } = snapshot;
+  const isDraft = server.state === 'draft';
+  const canChange = isDraft && mayEdit;
+  const findings = answer?.kind === 'verdict' ? answer.live.findings : [];
+  const { kit } = content;
+
+  async function addLine(place: Place, part: PartView) {
+    const letter = part.values.kind === 'coil-former' ? 'F' : referenceLetters[place];
+    const reference = nextReference(
+      letter,
+      lines.map((line) => line.reference),
+    );
+    const quantity = part.unit === 'each' ? 1 : 1000;
+    setProblem(await store.addLine({ versionId: server.id, place, partId: part.id, reference, quantity, note: '' }));
+  }
+
+  async function removeLine(line: LineView) {
+    const failed = await store.removeLine(line.id);
+    setProblem(failed);
+    if (failed) return;
+    const { place, partId, reference, quantity, note } = line;
+    say({
+      sentence: `${reference} is out of the version.`,
+      onUndo: () =>
+        void store.addLine({ versionId: server.id, place, partId, reference, quantity, note }).then(setProblem),
+    });
+  }
+
+  function applyRemedy({ text, code }: TriedRemedy) {
+    const remedy = findings.find((one) => one.code === code && one.remedy?.text === text)?.remedy;
+    const changed = remedy && settingsFrom(content, remedy.changes);
+    if (!changed) return;
+    if (changed.circuit !== content.circuit) store.changeCircuit(changed.circuit);
+    for (const [reference, quantity] of changed.quantities) {
+      const line = lines.find((one) => one.reference === reference);
+      if (line) store.changeLine(line.id, { quantity });
+    }
+  }
+
+  async function send() {
+    setDeed('send');
+    await store.saveNow();
+    const answered = await deeds.sendToCheck({ versionId: server.id, basedOn: store.read().server.saveNo });
+    setDeed(null);
+    setProblem(answered.ok ? null : answered.problem);
+    if (answered.ok) router.refresh();
+  }
+
+  async function callBack() {
+    setDeed('back');
+    const answered = await deeds.callBack({ versionId: server.id });
+    setDeed(null);
+    setProblem(answered.ok ? null : answered.problem);
+    if (answered.ok) router.refresh();
+  }
+
+  async function start() {
+    setDeed('start');
+    const answered = await deeds.startVersion({ kitId: server.kitId, fromVersionId: server.id });
+    if (answered.ok) router.push(`/bench/${answered.value.versionId}`);
+    else {
+      setDeed(null);
+      setProblem(answered.problem);
+    }
+  }
+
+  const lockedReason = lockOf(answer, save.kind, conflict !== null);
+  return (
+    <main id="main" className="flex min-h-dvh flex-col">
+      <VersionHead
+        view={server}
+        page="parts"
+        {...(mayEdit && { onStart: () => void start(), starting: deed === 'start' })}
+      />
+      <PhonePanes pane={pane} onPane={setPane} sentence={sentenceOf(answer, content.kit.band)} />
+      <div className="grid flex-1 md:grid-cols-[minmax(0,5fr)_minmax(0,6fr)] lg:grid-cols-[minmax(0,560px)_minmax(0,1fr)]">
+        <div
+          className={`${pane === 'parts' ? '' : 'hidden'} min-w-0 px-4 py-4 sm:px-6 md:block md:border-r md:border-rule`}
+        >
+          <div className="grid gap-4">
+            {problem && (
+              <Notice kind="stops" title="Not done" live="alert">
+                {problem.sentence}
+              </Notice>
+            )}
+            {conflict && <ConflictPanel conflict={conflict} onSettle={store.settle} />}
+            {!isDraft && (
+              <StateNotice
+                view={server}
+                onCallBack={mayEdit ? () => void callBack() : undefined}
+                pending={deed === 'back'}
+              />
+            )}
+            {server.held && <HeldPanel held={server.held} letter={server.letter} number={kit.number} />}
+            <LinesPane
+              snapshot={snapshot}
+              findings={findings}
+              errors={errorsOf(answer)}
+              store={canChange ? store : undefined}
+              onAdd={(place, part) => void addLine(place, part)}
+              onRemove={(line) => void removeLine(line)}
+            />
+          </div>
+        </div>
+        <div className={`${pane === 'verdict' ? '' : 'hidden'} min-w-0 bg-card px-4 py-4 sm:px-6 md:block`}>
+          <div className="md:sticky md:top-4">
+            <VerdictPane content={content} answer={answer} trying={trying} {...(canChange && { onTry: applyRemedy })} />
+          </div>
+        </div>
+      </div>
+      <FootBar
+        costMinor={lines.reduce((sum, line) => sum + line.costMinor, 0)}
+        massMilligrams={contentMass(content)}
+        pieces={lines.reduce((sum, line) => sum + (line.part?.unit === 'each' ? line.quantity : 1), 0)}
+        save={canChange ? save : null}
+        onRetry={() => void store.saveNow()}
+      >
+        {canChange && <UndoButtons store={store} canUndo={snapshot.canUndo} canRedo={snapshot.canRedo} />}
+        {canChange && (
+          <Button
+            variant="primary"
+            lockedReason={lockedReason}
+            reasonSide="before"
+            pending={deed === 'send'}
+            pendingLabel="Working it out on the server"
+            onClick={() => void send()}
+          >
+            Send to check
+          </Button>
+        )}
+      </FootBar>
+    </main>
+  );
+}
+
+function UndoButtons({ store, canUndo, canRedo }: { store: VersionStore; canUndo: boolean; canRedo: boolean }) {
+  return (
+    <>
+      {canUndo && (
+        <Button size="small" icon="undo" onClick={store.undo}>
+          Undo
+        </Button>
+      )}
+      {canRedo && (
+        <Button size="small" onClick={store.redo}>
+          Redo
+        </Button>
+      )}
+    </>
+  );
+}
+
+/** Under 900 px: the verdict sentence stays in sight, and one of two panes under it. */
+function PhonePanes({
+  pane,
+  onPane,
+  sentence,
+}: {
+  pane: 'parts' | 'verdict';
+  onPane: (pane: 'parts' | 'verdict') => void;
+  sentence: ReactNode;
+}) {
+  return (
+    <div className="sticky top-0 z-10 border-b border-rule bg-paper px-4 pt-2 md:hidden">
+      <p className="font-semibold">{sentence}</p>
+      <div role="group" aria-label="What is shown" className="mt-1 flex gap-2">
+        {(['parts', 'verdict'] as const).map((one) => (
+          <button
+            key={one}
+            type="button"
+            aria-pressed={pane === one}
+            onClick={() => onPane(one)}
+            className={`min-h-target flex-1 border-b-4 font-semibold ${pane === one ? 'border-copper' : 'border-transparent'}`}
+          >
+            {one === 'parts' ? 'Parts' : 'Verdict'}
+          </button>
+        ))}
+      </div>
+    </div>
+  );
+}
+
+function sentenceOf(answer: VerdictAnswer | null, band: { lo: number; hi: number }): string {
+  if (!answer) return 'Working out the reach';
+  if (answer.kind === 'lacks') return 'The verdict waits for parts';
+  if (answer.kind === 'invalid') return 'This set cannot be worked out';
+  return headlineOf(answer.live.verdict, answer.live.findings, band).title;
+}
+
+/** Why it cannot be sent yet, in words; undefined when it can. */
+function lockOf(answer: VerdictAnswer | null, save: string, hasConflict: boolean): string | undefined {
+  if (hasConflict) return 'Choose between the two values first.';
+  if (save === 'failed') return 'Save it first.';
+  if (answer?.kind === 'lacks') return answer.lacks[0] ?? 'Fill every place first.';
+  if (answer?.kind === 'invalid') return 'Mend the values that cannot be worked out.';
+  if (!answer) return 'The verdict is being worked out.';
+  if (save !== 'saved') return 'Wait until it is saved.';
+  return undefined;
+}
+
+function errorsOf(answer: VerdictAnswer | null): Record<string, string> {
+  const errors: Record<string, string> = {};
+  if (answer?.kind === 'invalid') {
+    for (const { path, message } of answer.issues) {
+      const field = fieldOf(path);
+      if (field.kind === 'circuit') errors[field.setting] ??= message;
+    }
+  }
+  if (answer?.kind === 'verdict') {
+    for (const { path, message } of stopsIn(answer.live.findings)) {
+      const field = fieldOf(path);
+      if (field.kind === 'circuit' && field.setting === 'pitch') errors[field.setting] ??= message;
+    }
+  }
+  return errors;
+}
