@@ -3,7 +3,7 @@ export { countBasket, readBasket } from './basket-view';
 export { blockLot } from './block-lot';
 export { bookRefund } from './book-refund';
 export { cancel } from './cancel';
-export { changeBasket } from './change-basket';
+export { addToBasket, changeBasket } from './change-basket';
 export { readCheckout } from './checkout-view';
 export { claimOrder } from './claim-order';
 export { giveBackUnpaid } from './give-back-unpaid';
