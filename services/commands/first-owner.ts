@@ -27,8 +27,8 @@ try {
   const password = process.env['COILYARD_OWNER_PASSWORD'] ?? (await ask('Password, at least 8 characters: '));
   const sql = openDatabase(env().COILYARD_DATABASE, { busyTimeoutMs: 5000 });
   useDatabase(sql);
-  const { secret, uri } = await people.createFirstOwner(systemActor('command'), { name, email, password });
-  await sql.destroy();
+  const made = people.createFirstOwner(systemActor('command'), { name, email, password });
+  const { secret, uri } = await made.finally(() => sql.destroy());
   console.log(`${name} is owner now. Enter this secret in an authenticator; it is shown this once:\n${secret ?? ''}`);
   console.log(`The same as an address that an authenticator opens:\n${uri ?? ''}`);
 } catch (error) {

@@ -8,8 +8,7 @@ const filename = process.env['COILYARD_DATABASE'] ?? 'data/coilyard.sqlite';
 if (existsSync(filename)) {
   const sql = openDatabase(filename, { busyTimeoutMs: 5000 });
   useDatabase(sql);
-  const report = await people.verifyChanges(systemActor('command'));
-  await sql.destroy();
+  const report = await people.verifyChanges(systemActor('command')).finally(() => sql.destroy());
   if (report.holds) console.log(`${report.lines} lines hold. The last one ends in ${report.head || 'nothing yet'}.`);
   else {
     console.error(report.sentence);

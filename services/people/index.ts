@@ -10,6 +10,7 @@ export { endSession, signOutEverywhere } from './end-sessions';
 export { inviteStaff, sendNewWayIn } from './invite-staff';
 export { type ChainReport, listChanges, verifyChanges } from './list-changes';
 export { type DemoPersonView, listDemoPeople, signInDemo } from './sign-in-demo';
+export { ownerOfYard } from './owner-of-yard';
 export { signInWithLink } from './sign-in-with-link';
 export { signInWithPassword } from './sign-in-with-password';
 export {
