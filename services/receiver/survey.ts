@@ -81,7 +81,7 @@ function coilOf({ plan }: Prepared): Verdict['coil'] {
     sections,
     q: (TWO_PI * f * circuit.l) / coilResistanceAt(circuit, f),
     cSelf: circuit.cSelf,
-    selfResonance: circuit.cSelf > 0 ? resonance(circuit.l, circuit.cSelf) : null,
+    selfResonance: circuit.l * circuit.cSelf > 0 ? resonance(circuit.l, circuit.cSelf) : null,
     wireLength: wire,
     length: wound === null ? null : wound.length(),
     rDc:

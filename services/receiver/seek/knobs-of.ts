@@ -195,12 +195,7 @@ export function knobsOf({ code, path }: Pick<Found, 'code' | 'path'>, figures: F
     case 'PHONE-DAMP':
       return [detectorTap(design, input), otherDetector(design, input), returnResistor(design, input, 'up')];
     case 'EARTH-NONE':
-      return [
-        one({
-          text: 'Give the set an earth lead.',
-          changes: [changeTo(input, 'earth', { kind: 'resistance', r: 50 })],
-        }),
-      ];
+      return [earthLead(design, input)];
     case 'FORMER-SHORT':
       return [formerSteps(figures, input)];
     default:

@@ -18,7 +18,7 @@ export interface RemedyContext {
 }
 
 /** Most judgements of one finding, and of one that needs the boxes drawn each time. */
-const MOST_TRIES = 160;
+const MOST_TRIES = 40;
 const MOST_DRAWN = 20;
 
 /** Stops that a change brings about. */
@@ -56,25 +56,51 @@ export interface Cleared {
 
 /** First step of a knob that clears the finding without a new stop, or else the first that clears it at all. */
 export function firstClearing(knob: Knob, search: Search, budget: { left: number }): Cleared | null {
-  const { found, rules, context, before } = search;
-  const { code, path } = found;
-  const end = code === 'BAND-LOW' || code === 'BAND-HIGH';
-  const options = { rules, seed: context.seed, boxes: context.boxes };
+  const { code, path } = search.found;
+  if (code === 'BAND-LOW' || code === 'BAND-HIGH') return endClearing([...knob], search);
   let spoiling: Cleared | null = null;
   let beyond = 0;
   for (const step of knob) {
     if (budget.left <= 0 || beyond > BEYOND) break;
     budget.left -= 1;
     if (spoiling !== null) beyond += 1;
-    if (end && !endCleared(code, context.input, step.changes, rules)) continue;
-    const outcome = attempt(context.input, step.changes, options, depthOf(code));
+    const outcome = tried(step, search);
     if (outcome === null) continue;
     if (outcome.found.some((after) => after.code === code && (after.path === path || !REPEATED.has(code)))) continue;
-    const cleared = { step, outcome, spoils: newStops(outcome, before) };
+    const cleared = { step, outcome, spoils: newStops(outcome, search.before) };
     if (!cleared.spoils) return cleared;
     spoiling ??= cleared;
   }
   return spoiling;
+}
+
+function tried(step: Step, { found, rules, context }: Search): Outcome | null {
+  return attempt(context.input, step.changes, { rules, seed: context.seed, boxes: context.boxes }, depthOf(found.code));
+}
+
+/** An end moves one way with each knob, so the smallest step that clears it is found by doubling and halving. */
+function endClearing(steps: readonly Step[], search: Search): Cleared | null {
+  const { found, rules, context, before } = search;
+  const clears = (index: number): boolean => endCleared(found.code, context.input, steps[index]?.changes ?? [], rules);
+  let low = -1;
+  let high = 0;
+  while (high < steps.length && !clears(high)) {
+    low = high;
+    high = 2 * high + 1;
+  }
+  if (high >= steps.length) {
+    high = steps.length - 1;
+    if (high <= low || !clears(high)) return null;
+  }
+  while (high - low > 1) {
+    const middle = Math.floor((low + high) / 2);
+    if (clears(middle)) high = middle;
+    else low = middle;
+  }
+  const step = steps[high];
+  const outcome = step === undefined ? null : tried(step, search);
+  if (step === undefined || outcome === null || outcome.found.some((after) => after.code === found.code)) return null;
+  return { step, outcome, spoils: newStops(outcome, before) };
 }
 
 /** Codes that may stand several times, told apart by their path. */
