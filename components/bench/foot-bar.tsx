@@ -6,7 +6,7 @@ import { Icon } from '@/components/ui/icon';
 import { Sign } from '@/components/ui/sign';
 import { formatMoney, money } from '@/services/money';
 import { grouped } from '@/services/quantity';
-import { showClock } from '@/services/time';
+import { showClock, showMoment } from '@/services/time';
 import type { SaveState } from './version-store';
 
 export interface FootBarProps {
@@ -40,7 +40,7 @@ function SaveMark({ save, onRetry }: { save: SaveState; onRetry: () => void }) {
       {save.kind === 'saved' && (
         <>
           <Icon name="check" size={16} />
-          {`Saved ${showClock(save.at)}`}
+          {`Saved ${save.earlier ? showMoment(save.at) : showClock(save.at)}`}
         </>
       )}
       {save.kind === 'waiting' && 'Not saved yet'}

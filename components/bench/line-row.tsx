@@ -29,7 +29,8 @@ export function LineRow({ line, cause, onChange, onRemove }: LineRowProps) {
   const { part } = line;
   if (!part) return null;
   const words = partWords(part.values);
-  const amount = part.unit === 'each' && line.quantity === 1 ? null : quantityWords(line.quantity, part.unit);
+  const isOne = part.unit === 'each' && (line.quantity === 1 || words.value === undefined);
+  const amount = isOne ? null : quantityWords(line.quantity, part.unit);
   const detail = cause ?? [amount, words.detail, line.retired && 'retired'].filter((one) => one).join(', ');
   return (
     <li>

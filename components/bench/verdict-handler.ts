@@ -9,6 +9,9 @@ import type { LiveVerdict, TriedRemedy, VerdictAnswer, VerdictRequest } from './
 const SEED = 1;
 const CONTOUR_BOXES = 500;
 const CURVE_POINTS = 141;
+/** Closer points around each peak, so that it is drawn as sharp as it is. */
+const PEAK_STEPS = 12;
+const PEAK_STEP = 0.0015;
 const MOST_REMEDIES = 3;
 
 /** Works out one request. The same functions run on the server when a version is sent to check. */
@@ -41,7 +44,7 @@ function settingsOf(design: DesignInput, verdict: Verdict): ResponseSetting[] {
   const low = design.band.lo / 1.3;
   const ratio = (design.band.hi * 1.3) / low;
   const f = Array.from({ length: CURVE_POINTS }, (_, index) => low * ratio ** (index / (CURVE_POINTS - 1)));
-  for (const at of tuned) f.push(at);
+  for (const at of tuned) for (let step = -PEAK_STEPS; step <= PEAK_STEPS; step++) f.push(at * (1 + step * PEAK_STEP));
   f.sort((a, b) => a - b);
   return responseCurves(design, tuned, f).map((curve, index) => ({
     f: tuned[index] ?? 0,

@@ -27,7 +27,7 @@ export function VerdictHead(props: {
         <p className="max-w-[34rem]">{text}</p>
       </div>
       {props.share && (
-        <p className="text-right">
+        <p className="ml-[62px] lg:ml-0 lg:text-right">
           <span className="block font-figures text-[34px] leading-[38px] font-semibold">{props.share.figure}</span>
           <span className="block max-w-40 text-caption text-ink2">{props.share.text}</span>
         </p>

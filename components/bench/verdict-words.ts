@@ -2,6 +2,7 @@ import type { Finding } from '@/services/kits/rules';
 import { notesIn, stopsIn } from '@/services/kits/rules';
 import type { Verdict } from '@/services/receiver';
 import type { SignKind } from '@/components/ui/sign';
+import { shownDifference, shownKHz } from '@/templates/drawings/reach-axis';
 
 export interface Headline {
   sign: SignKind;
@@ -48,22 +49,20 @@ function shortText(
 ): string {
   const { lo, hi } = reach.corners;
   if (short.low && short.high) {
-    return `At worst case this version tunes ${kHz(lo)} to ${kHz(hi)} kHz. The band asks for ${kHz(band.lo)} to ${kHz(band.hi)}.`;
+    return `At worst case this version tunes ${shownKHz(lo)} to ${shownKHz(hi)} kHz. The band asks for ${shownKHz(band.lo)} to ${shownKHz(band.hi)}.`;
   }
   if (short.low) {
-    return `At worst case this version stops at ${kHz(lo)} kHz. The band asks for ${kHz(band.lo)}, so ${kHz(lo) - kHz(band.lo)} kHz is out of reach.`;
+    return `At worst case this version stops at ${shownKHz(lo)} kHz. The band asks for ${shownKHz(band.lo)}, so ${shownDifference(lo - band.lo)} kHz is out of reach.`;
   }
-  return `At worst case this version ends at ${kHz(hi)} kHz. The band asks for ${kHz(band.hi)}, so ${kHz(band.hi) - kHz(hi)} kHz is out of reach.`;
+  return `At worst case this version ends at ${shownKHz(hi)} kHz. The band asks for ${shownKHz(band.hi)}, so ${shownDifference(band.hi - hi)} kHz is out of reach.`;
 }
 
 function clears({ reach }: Verdict, notes: number, band: { lo: number; hi: number }): Headline {
   const { lo, hi } = reach.corners;
-  const low = kHz(band.lo) - kHz(lo);
-  const high = kHz(hi) - kHz(band.hi);
-  const covers = low >= 0 && high >= 0;
-  const text = covers
-    ? `At worst case this version tunes ${kHz(lo)} to ${kHz(hi)} kHz: spare ${low} below the band and ${high} above it.`
-    : `At nominal values it covers the band. At worst case it tunes ${kHz(lo)} to ${kHz(hi)} kHz; the share of boxes decides.`;
+  const text =
+    lo <= band.lo && hi >= band.hi
+      ? `At worst case this version tunes ${shownKHz(lo)} to ${shownKHz(hi)} kHz: spare ${shownDifference(band.lo - lo)} below the band and ${shownDifference(hi - band.hi)} above it.`
+      : `At nominal values it covers the band. At worst case it tunes ${shownKHz(lo)} to ${shownKHz(hi)} kHz; the share of boxes decides.`;
   const title =
     notes === 0 ? 'Clears every rule' : notes === 1 ? 'Clears, with one note' : `Clears, with ${notes} notes`;
   return { sign: notes === 0 ? 'clears' : 'note', title, text };

@@ -25,7 +25,8 @@ export interface VersionDeeds {
 }
 
 export type SaveState =
-  | { kind: 'saved'; at: number }
+  /** `earlier`: before the page was opened, so that its day is said too. */
+  | { kind: 'saved'; at: number; earlier?: true }
   | { kind: 'waiting' }
   | { kind: 'saving' }
   /** Nothing is lost; "Try again" sends it once more. */
@@ -88,7 +89,7 @@ export class VersionStore {
       guide: view.content.guide,
       lines: view.lines,
       content: view.content,
-      save: { kind: 'saved', at: view.updatedAt },
+      save: { kind: 'saved', at: view.updatedAt, earlier: true },
       conflict: null,
       canUndo: false,
       canRedo: false,

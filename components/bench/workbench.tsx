@@ -127,16 +127,18 @@ function Bench({ view, mayEdit, deeds }: WorkbenchProps) {
 
   const lockedReason = lockOf(answer, save.kind, conflict !== null);
   return (
-    <main id="main" className="flex min-h-dvh flex-col">
+    <main id="main" className="flex min-h-dvh flex-col md:h-dvh">
       <VersionHead
         view={server}
         page="parts"
         {...(mayEdit && { onStart: () => void start(), starting: deed === 'start' })}
       />
       <PhonePanes pane={pane} onPane={setPane} sentence={sentenceOf(answer, content.kit.band)} />
-      <div className="grid flex-1 md:grid-cols-[minmax(0,5fr)_minmax(0,6fr)] lg:grid-cols-[minmax(0,560px)_minmax(0,1fr)]">
-        <div
-          className={`${pane === 'parts' ? '' : 'hidden'} min-w-0 px-4 py-4 sm:px-6 md:block md:border-r md:border-rule`}
+      <div className="grid flex-1 md:min-h-0 md:grid-cols-[minmax(0,5fr)_minmax(0,6fr)] lg:grid-cols-[minmax(0,560px)_minmax(0,1fr)]">
+        <section
+          aria-label="Parts and circuit"
+          tabIndex={-1}
+          className={`${pane === 'parts' ? '' : 'hidden'} min-w-0 px-4 py-4 sm:px-6 md:block md:overflow-y-auto md:border-r md:border-rule`}
         >
           <div className="grid gap-4">
             {problem && (
@@ -162,12 +164,14 @@ function Bench({ view, mayEdit, deeds }: WorkbenchProps) {
               onRemove={(line) => void removeLine(line)}
             />
           </div>
-        </div>
-        <div className={`${pane === 'verdict' ? '' : 'hidden'} min-w-0 bg-card px-4 py-4 sm:px-6 md:block`}>
-          <div className="md:sticky md:top-4">
-            <VerdictPane content={content} answer={answer} trying={trying} {...(canChange && { onTry: applyRemedy })} />
-          </div>
-        </div>
+        </section>
+        <section
+          aria-label="Verdict"
+          tabIndex={0}
+          className={`${pane === 'verdict' ? '' : 'hidden'} min-w-0 bg-card px-4 py-4 outline-offset-[-4px] sm:px-6 md:block md:overflow-y-auto`}
+        >
+          <VerdictPane content={content} answer={answer} trying={trying} {...(canChange && { onTry: applyRemedy })} />
+        </section>
       </div>
       <FootBar
         costMinor={lines.reduce((sum, line) => sum + line.costMinor, 0)}

@@ -14,6 +14,8 @@ interface Rule {
 }
 
 const percent = (share: number) => `${(share * 100).toFixed(1)}\u202f%`;
+/** Rounded down, so that what is sure is never said to be more: 99.98 %, not 100. */
+const sure = (share: number) => `${(Math.floor(share * 10_000) / 100).toFixed(2)}\u202f%`;
 
 /** The rules of the catalogue in its order, with what each says of a version that clears it. */
 const rules: readonly Rule[] = [
@@ -56,7 +58,7 @@ const rules: readonly Rule[] = [
       share === null
         ? null
         : {
-            text: `At least ${percent(share.low)} of all boxes is sure.`,
+            text: `At least ${sure(share.low)} of all boxes is sure.`,
             figure: `${grouped(share.covered)} of ${grouped(share.boxes)}`,
           },
   },
