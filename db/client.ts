@@ -81,7 +81,7 @@ export function database(): Knex {
 }
 
 /** Lets worker, commands and tests choose the file and the waiting time. */
-export function useDatabase(sql: Knex | undefined): void {
+export function setDatabase(sql: Knex | undefined): void {
   if (sql) holder.coilyardDatabase = sql;
   else delete holder.coilyardDatabase;
 }

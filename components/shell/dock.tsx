@@ -1,5 +1,5 @@
-import type { Actor } from '@/services/access';
-import { can } from '@/services/access';
+import type { Actor } from '@/services/access/actor';
+import { can } from '@/services/access/can';
 import { Icon } from '@/components/ui/icon';
 import { NavLink } from './nav-link';
 import { PersonMenu } from './person-menu';

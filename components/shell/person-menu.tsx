@@ -1,6 +1,7 @@
 import Link from 'next/link';
 import { Icon } from '@/components/ui/icon';
-import { type Actor, can } from '@/services/access';
+import type { Actor } from '@/services/access/actor';
+import { can } from '@/services/access/can';
 import { rooms } from './rooms';
 
 const initials = (name: string) =>

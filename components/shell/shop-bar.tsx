@@ -1,7 +1,7 @@
 import Link from 'next/link';
 import { Wordmark } from '@/components/devices/wordmark';
 import { Icon } from '@/components/ui/icon';
-import type { Actor } from '@/services/access';
+import type { Actor } from '@/services/access/actor';
 import { NavLink } from './nav-link';
 import { PersonMenu } from './person-menu';
 

@@ -1,4 +1,4 @@
-import { openDatabase, useDatabase } from '@/db/client';
+import { openDatabase, setDatabase } from '@/db/client';
 import { parseEnv } from '@/services/env';
 import { reading } from '@/services/record';
 import { fillBench, fillParts } from './fill-bench';
@@ -8,7 +8,7 @@ import { endClock, hirePeople, startClock } from './yard';
 
 /** Fills an empty database with the demo yard, by the same deeds that people do through the pages. */
 const { COILYARD_DATABASE: filename } = parseEnv(process.env);
-useDatabase(openDatabase(filename, { busyTimeoutMs: 5000 }));
+setDatabase(openDatabase(filename, { busyTimeoutMs: 5000 }));
 
 const somebody = await reading()('people').first('id');
 if (somebody) console.log('   the yard of last time is there and stays as it is');

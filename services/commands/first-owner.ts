@@ -1,5 +1,5 @@
 import { createInterface } from 'node:readline/promises';
-import { openDatabase, useDatabase } from '@/db/client';
+import { openDatabase, setDatabase } from '@/db/client';
 import { systemActor } from '../access';
 import { env } from '../env';
 import * as people from '../people';
@@ -26,7 +26,7 @@ try {
   const email = option('email') ?? (await ask('E-mail address: '));
   const password = process.env['COILYARD_OWNER_PASSWORD'] ?? (await ask('Password, at least 8 characters: '));
   const sql = openDatabase(env().COILYARD_DATABASE, { busyTimeoutMs: 5000 });
-  useDatabase(sql);
+  setDatabase(sql);
   const made = people.createFirstOwner(systemActor('command'), { name, email, password });
   const { secret, uri } = await made.finally(() => sql.destroy());
   console.log(`${name} is owner now. Enter this secret in an authenticator; it is shown this once:\n${secret ?? ''}`);

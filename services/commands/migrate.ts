@@ -1,9 +1,9 @@
-import { database, openDatabase, useDatabase } from '@/db/client';
+import { database, openDatabase, setDatabase } from '@/db/client';
 import { migrationSource } from '@/db/migrations';
 
 /** `npm run db:migrate`: brings the database to the newest form; `--down` takes the last step back. */
 const filename = process.env['COILYARD_DATABASE'] ?? 'data/coilyard.sqlite';
-useDatabase(openDatabase(filename, { busyTimeoutMs: 5000 }));
+setDatabase(openDatabase(filename, { busyTimeoutMs: 5000 }));
 const sql = database();
 const migrate = process.argv.includes('--down') ? sql.migrate.down : sql.migrate.latest;
 const [, done] = (await migrate.call(sql.migrate, { migrationSource })) as [number, string[]];

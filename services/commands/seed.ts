@@ -1,4 +1,4 @@
-import { openDatabase, useDatabase } from '@/db/client';
+import { openDatabase, setDatabase } from '@/db/client';
 import { systemActor } from '../access';
 import { env } from '../env';
 import type { Money } from '../money';
@@ -38,7 +38,7 @@ async function seed(): Promise<void> {
 
 try {
   const sql = openDatabase(env().COILYARD_DATABASE, { busyTimeoutMs: 5000 });
-  useDatabase(sql);
+  setDatabase(sql);
   await seed().finally(() => sql.destroy());
 } catch (error) {
   console.error(error instanceof Error ? error.message : error);

@@ -1,5 +1,5 @@
 import { existsSync } from 'node:fs';
-import { openDatabase, useDatabase } from '@/db/client';
+import { openDatabase, setDatabase } from '@/db/client';
 import { systemActor } from '../access';
 import * as people from '../people';
 
@@ -7,7 +7,7 @@ import * as people from '../people';
 const filename = process.env['COILYARD_DATABASE'] ?? 'data/coilyard.sqlite';
 if (existsSync(filename)) {
   const sql = openDatabase(filename, { busyTimeoutMs: 5000 });
-  useDatabase(sql);
+  setDatabase(sql);
   const report = await people.verifyChanges(systemActor('command')).finally(() => sql.destroy());
   if (report.holds) console.log(`${report.lines} lines hold. The last one ends in ${report.head || 'nothing yet'}.`);
   else {

@@ -1,4 +1,4 @@
-import { openDatabase, useDatabase } from '@/db/client';
+import { openDatabase, setDatabase } from '@/db/client';
 import { env } from '../env';
 import { log } from '../log';
 import { startWorker } from '.';
@@ -7,7 +7,7 @@ import { startWorker } from '.';
 function start(): void {
   // A process of its own may wait for the lock longer than a page may.
   const sql = openDatabase(env().COILYARD_DATABASE, { busyTimeoutMs: 5000 });
-  useDatabase(sql);
+  setDatabase(sql);
   const worker = startWorker();
   log().info('worker started');
 

@@ -2,7 +2,7 @@
  * A process of its own that buys, for tests of two processes on one file.
  * Arguments: the database file, the version, how many buyers at once. Prints one JSON line: how many got a kit.
  */
-import { openDatabase, useDatabase as chooseDatabase } from '@/db/client';
+import { openDatabase, setDatabase as chooseDatabase } from '@/db/client';
 import { visitor } from '@/services/access';
 import { newId } from '@/services/ids';
 import { changeBasket, placeOrder } from '@/services/orders';

@@ -5,7 +5,7 @@ import { join } from 'node:path';
 import { fileURLToPath } from 'node:url';
 import type { Knex } from 'knex';
 import { afterAll, beforeAll } from 'vitest';
-import { openDatabase, useDatabase } from '@/db/client';
+import { openDatabase, setDatabase } from '@/db/client';
 import { migrationSource } from '@/db/migrations';
 import { setClock } from '@/services/record';
 
@@ -34,12 +34,12 @@ export function testDatabase(): TestDatabase {
     folder = mkdtempSync(join(tmpdir(), 'coilyard-test-'));
     copyFileSync(await migratedTemplate(), filename());
     sql = openDatabase(filename(), { busyTimeoutMs: 250, acquireTimeoutMs: 2000 });
-    useDatabase(sql);
+    setDatabase(sql);
   });
 
   afterAll(async () => {
     setClock(undefined);
-    useDatabase(undefined);
+    setDatabase(undefined);
     for (const connection of [...others, sql]) await connection?.destroy();
     rmSync(folder, { recursive: true, force: true });
   });

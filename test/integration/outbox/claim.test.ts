@@ -1,5 +1,5 @@
 import { afterEach, beforeEach, expect, it } from 'vitest';
-import { useDatabase } from '@/db/client';
+import { setDatabase } from '@/db/client';
 import { systemActor, visitor } from '@/services/access';
 import * as outbox from '@/services/outbox';
 import { setClock, write } from '@/services/record';
@@ -16,7 +16,7 @@ beforeEach(async () => {
 });
 afterEach(() => {
   setClock(undefined);
-  useDatabase(db.sql);
+  setDatabase(db.sql);
 });
 
 const queue = (key: string, dueAt?: number) =>
@@ -38,9 +38,9 @@ it('workers in two processes never get the same job', async () => {
   for (let index = 0; index < 40; index++) await queue(`job ${index}`);
   const taken: string[] = [];
   for (let round = 0; round < 20; round++) {
-    useDatabase(db.sql);
+    setDatabase(db.sql);
     const one = outbox.claimNext(worker, 'mail');
-    useDatabase(other);
+    setDatabase(other);
     const two = outbox.claimNext(worker, 'mail');
     for (const job of await Promise.all([one, two])) if (job) taken.push(job.id);
   }

@@ -175,8 +175,8 @@ describe('scanning', () => {
     const { boxId } = await claimedBox();
     const before = await onHand(label('WIRE-04'));
     const answer = await scan(packer, { boxId, code: label('WIRE-04') });
-    expect(answer.title).toBe('Right: enamelled wire, 0.4 mm, 18 m');
-    expect(await onHand(label('WIRE-04'))).toBe(before - 18_000);
+    expect(answer.title).toBe('Right: enamelled wire, 0.4 mm, 14 m');
+    expect(await onHand(label('WIRE-04'))).toBe(before - 14_000);
   });
 
   it('a counted handful goes in at once, and never more than the box takes', async () => {
@@ -192,7 +192,7 @@ describe('scanning', () => {
 
   it('says what is wrong with each wrong code, and changes nothing', async () => {
     const { boxId } = await claimedBox();
-    await scan(packer, { boxId, code: label('FORM-72') });
+    await scan(packer, { boxId, code: label('FORM-63') });
     const odd = await millrace({ code: 'ODD', number: 72 });
     const strange = await lotOf(packer, odd.parts.get('GUIDE') ?? failed(), 5);
     const unread = await lotOf(packer, kit.parts.get('TERM-B') ?? failed(), 5, { accepted: false });
@@ -203,7 +203,7 @@ describe('scanning', () => {
       [await codeOf(strange.lotId), 'Wrong: not in this box'],
       [await codeOf(blocked.lotId), 'Wrong: blocked lot'],
       [await codeOf(unread.lotId), 'Wrong: not inspected'],
-      [label('FORM-72'), 'Wrong: already complete'],
+      [label('FORM-63'), 'Wrong: already complete'],
       ['NOTHING-HERE', 'Wrong: unknown code'],
       [serial, 'Wrong: the box itself'],
       [serial.slice(0, -1) + (serial.endsWith('A') ? 'B' : 'A'), 'Wrong: read badly'],
@@ -309,13 +309,13 @@ describe('guide, slip, scale and lid', () => {
     const { boxId } = await claimedBox();
     await fill(boxId);
     await finish(boxId);
-    await reading()('lots').where('code', label('CER-47')).update({ state: 'blocked' });
+    await reading()('lots').where('code', label('CER-10')).update({ state: 'blocked' });
     try {
       await expect(closeBox(packer, { boxId })).rejects.toThrow(
-        `Lot ${label('CER-47')} (ceramic capacitor, 47 pF) was blocked`,
+        `Lot ${label('CER-10')} (ceramic capacitor, 10 pF) was blocked`,
       );
     } finally {
-      await reading()('lots').where('code', label('CER-47')).update({ state: 'accepted' });
+      await reading()('lots').where('code', label('CER-10')).update({ state: 'accepted' });
     }
   });
 
@@ -381,17 +381,17 @@ describe('trace', () => {
       packedBy: 'Bo Orne',
     });
     expect(trace.lines.every((line) => line.lots.length === 1)).toBe(true);
-    const lot = await traceLot(packer, label('FORM-72'));
+    const lot = await traceLot(packer, label('FORM-63'));
     expect(lot.boxes.map((box) => box.serial)).toContain(serial);
   });
 
   it('hides the buyer from those who neither send nor answer for it', async () => {
     const checker = await staff('Nell Ware', 'checker');
     const { boxId } = await claimedBox();
-    await scan(packer, { boxId, code: label('FORM-72') });
+    await scan(packer, { boxId, code: label('FORM-63') });
     const { serial } = await readBox(packer, boxId);
     expect((await traceBox(checker, serial)).buyer).toBeNull();
-    expect((await traceLot(checker, label('FORM-72'))).boxes.every((box) => box.buyer === null)).toBe(true);
+    expect((await traceLot(checker, label('FORM-63'))).boxes.every((box) => box.buyer === null)).toBe(true);
     await expect(traceBox({ kind: 'visitor' }, serial)).rejects.toThrow();
   });
 });

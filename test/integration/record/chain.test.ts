@@ -1,6 +1,6 @@
 import { copyFileSync } from 'node:fs';
 import { afterEach, expect, it } from 'vitest';
-import { openDatabase, useDatabase } from '@/db/client';
+import { openDatabase, setDatabase } from '@/db/client';
 import { type Actor, systemActor } from '@/services/access';
 import { PersonId, newId } from '@/services/ids';
 import * as people from '@/services/people';
@@ -11,7 +11,7 @@ const db = testDatabase();
 const command = systemActor('command');
 const maud: Actor = { kind: 'staff', id: PersonId.parse(newId()), name: 'Maud Orrin', email: '', roles: ['owner'] };
 
-afterEach(() => useDatabase(db.sql));
+afterEach(() => setDatabase(db.sql));
 
 async function addLines(count: number): Promise<void> {
   await write(maud, async (tx) => {
@@ -33,7 +33,7 @@ async function tampered(statements: readonly string[]): Promise<Awaited<ReturnTy
   const copy = openDatabase(filename);
   for (const deed of ['update', 'delete']) await copy.raw(`drop trigger changes_no_${deed}`);
   for (const statement of statements) await copy.raw(statement);
-  useDatabase(copy);
+  setDatabase(copy);
   const report = await people.verifyChanges(command);
   await copy.destroy();
   return report;

@@ -10,7 +10,7 @@ import {
 } from '@/services/receiver';
 import { anyDesign } from './any-design';
 
-const RUNS = { numRuns: 300, seed: 20261201 };
+const RUNS = { numRuns: 120, seed: 20261201 };
 
 /** The verdict of a design, or null where the file is refused. */
 function verdictOf(design: DesignInput, options?: EvaluateOptions): Verdict | null {
@@ -35,7 +35,7 @@ describe('whatever the form lets through', () => {
       }),
       RUNS,
     );
-    expect(judged).toBeGreaterThan(200);
+    expect(judged).toBeGreaterThan(80);
   });
 
   test('gets the same bytes for the same seed, and keeps its reach when only the seed changes', () => {
@@ -46,7 +46,7 @@ describe('whatever the form lets through', () => {
         const other = verdictOf(design, { seed: seed + 1, boxes: 400 });
         expect(other?.reach).toEqual(first?.reach);
       }),
-      { ...RUNS, numRuns: 60 },
+      { ...RUNS, numRuns: 30 },
     );
   });
 
@@ -95,7 +95,8 @@ describe('a remedy', () => {
         for (const { code, path, remedy } of verdict?.findings ?? []) {
           if (remedy === null) continue;
           expect(remedy.changes.length).toBeGreaterThan(0);
-          const after = evaluate(applyChanges(design, remedy.changes), { boxes: 400 });
+          const boxes = code === 'BAND-YIELD' ? 400 : 0;
+          const after = evaluate(applyChanges(design, remedy.changes), { boxes });
           const stays = after.findings.some(
             (finding) => finding.code === code && (code !== 'SEL-STRONG' || finding.path === path),
           );
