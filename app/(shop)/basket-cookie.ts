@@ -1,4 +1,3 @@
-import 'server-only';
 import { cookies } from 'next/headers';
 import { env } from '@/services/env';
 import { newId } from '@/services/ids';

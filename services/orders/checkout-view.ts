@@ -3,15 +3,7 @@ import { formatMoney } from '../money';
 import { reading } from '../record';
 import { readBasket } from './basket-view';
 import * as rows from './rows';
-import type { BasketView } from './schemas';
-
-export interface CheckoutView {
-  basket: BasketView;
-  /** Ways of sending with the countries they serve; "*" for everywhere else. */
-  deliveries: { code: string; name: string; promise: string; countries: string[]; price: string; minor: number }[];
-  /** What is known of a buyer who has signed in. */
-  known: { email: string; name: string } | null;
-}
+import type { CheckoutView } from './schemas';
 
 /** What the checkout form shows: the basket, the ways of sending, and who is asking. */
 export async function readCheckout(actor: Actor, basketId: string | null): Promise<CheckoutView> {

@@ -131,6 +131,14 @@ export const OrderLine = z.strictObject({
   quantity: z.int(),
   unit: Money,
   total: Money,
+  /** What the frozen version says of the set: what it tunes, how much wire it wants, whether it wants an earth. */
+  set: z
+    .strictObject({
+      tunes: z.strictObject({ lo: z.number(), hi: z.number() }),
+      aerialMetres: z.int(),
+      earth: z.boolean(),
+    })
+    .nullable(),
 });
 export type OrderLine = z.infer<typeof OrderLine>;
 
@@ -186,6 +194,8 @@ export const OrderView = z.strictObject({
   boxes: z.array(OrderBox),
   invoice: z.strictObject({ id: z.string(), number: z.int() }).nullable(),
   shipments: z.array(z.strictObject({ carrier: z.string(), trackingNumber: z.string(), at: z.int() })),
+  /** Until when the kits of an unpaid order are set aside; null where they are not. */
+  keptUntil: z.int().nullable(),
   /** The bank refused the last try and nothing was taken. */
   bankSaidNo: z.boolean(),
   may: z.strictObject({ pay: z.boolean(), cancel: z.boolean(), claim: z.boolean() }),
@@ -241,3 +251,12 @@ export const Invoice = z.strictObject({
   total: Money,
 });
 export type Invoice = z.infer<typeof Invoice>;
+
+/** What the checkout form shows. */
+export interface CheckoutView {
+  basket: BasketView;
+  /** Ways of sending with the countries they serve; "*" for everywhere else. */
+  deliveries: { code: string; name: string; promise: string; countries: string[]; price: string; minor: number }[];
+  /** What is known of a buyer who has signed in. */
+  known: { email: string; name: string } | null;
+}

@@ -1,16 +1,18 @@
 import type { Knex } from 'knex';
 import { type Actor, can, must } from '../access';
-import { OrderId } from '../ids';
-import { type Money, money, times } from '../money';
-import { missing, parse } from '../problem';
-import { reading } from '../record';
+import { OrderId, type VersionId } from '../ids';
+import { readFrozen } from '../kits';
+import { type Currency, type Money, money, times } from '../money';
+import { Problem, missing, parse } from '../problem';
+import { now, reading } from '../record';
+import { liveReservation } from '../stock';
 import { boxesOf, packingTimes } from './box-rows';
 import { orderLink } from './link';
 import { openOrder, ownership } from './order-access';
 import { lastEventOf, shipmentsOf } from './order-facts';
 import * as rows from './rows';
 import { headlineOf, mayCancel, mayPay, timelineOf } from './rules';
-import { Invoice, OrderRef, OrderView } from './schemas';
+import { Invoice, type OrderLine, OrderRef, OrderView } from './schemas';
 
 /** One order as its buyer, or somebody of the yard, sees it. */
 export async function readOrder(actor: Actor, input: OrderRef): Promise<OrderView> {
@@ -27,6 +29,7 @@ export async function readOrder(actor: Actor, input: OrderRef): Promise<OrderVie
     await invoiceOf(sql, order.id),
     await lastEventOf(sql, order.id),
   ];
+  const reservation = await liveReservation(sql, order.id);
   const method = deliveries.find((one) => one.code === order.deliveryCode);
   const promise = method?.promise ?? 'a few working days';
   const facts = {
@@ -55,10 +58,7 @@ export async function readOrder(actor: Actor, input: OrderRef): Promise<OrderVie
     placedAt: order.placedAt,
     paidAt: order.paidAt,
     shippedAt: order.shippedAt,
-    lines: lines.map(({ versionId, code, kitNumber, name, letter, quantity, unitMinor }) => {
-      const unit = money(unitMinor, order.currency);
-      return { versionId, code, number: kitNumber, name, letter, quantity, unit, total: times(unit, quantity) };
-    }),
+    lines: await linesFor(sql, lines, order.currency),
     linesTotal: order.lines,
     deliveryPrice: order.delivery,
     tax: order.tax,
@@ -71,6 +71,7 @@ export async function readOrder(actor: Actor, input: OrderRef): Promise<OrderVie
     boxes,
     invoice,
     shipments,
+    keptUntil: reservation?.state === 'reserved' && reservation.expiresAt > now() ? reservation.expiresAt : null,
     bankSaidNo: order.payment === 'awaiting-payment' && lastEvent === 'payment_intent.payment_failed',
     may: {
       pay: mayPay(order) && can(actor, 'order.pay', owned),
@@ -79,6 +80,31 @@ export async function readOrder(actor: Actor, input: OrderRef): Promise<OrderVie
     },
     lookAtIt: can(actor, 'order.list') && order.lookAtIt !== '' ? order.lookAtIt : null,
   });
+}
+
+function linesFor(sql: Knex, lines: readonly rows.StoredLine[], currency: Currency): Promise<OrderLine[]> {
+  return Promise.all(
+    lines.map(async ({ versionId, code, kitNumber, name, letter, quantity, unitMinor }) => {
+      const unit = money(unitMinor, currency);
+      const set = await setOf(sql, versionId);
+      return { versionId, code, number: kitNumber, name, letter, quantity, unit, total: times(unit, quantity), set };
+    }),
+  );
+}
+
+/** Old orders stay readable whatever became of their version; what cannot be vouched for is left out. */
+async function setOf(sql: Knex, versionId: VersionId): Promise<OrderLine['set']> {
+  try {
+    const { kit, circuit } = (await readFrozen(sql, versionId)).content;
+    return {
+      tunes: { lo: kit.band.firstCarrier, hi: kit.band.lastCarrier },
+      aerialMetres: Math.round(circuit.aerial.vertical + circuit.aerial.horizontal),
+      earth: circuit.earth.kind !== 'none',
+    };
+  } catch (error) {
+    if (error instanceof Problem) return null;
+    throw error;
+  }
 }
 
 async function invoiceOf(sql: Knex, orderId: string): Promise<{ id: string; number: number } | null> {

@@ -7,15 +7,13 @@ import { BuyBox } from '@/components/shop/buy-box';
 import { Cautions } from '@/components/shop/cautions';
 import { CheckPanel } from '@/components/shop/check-panel';
 import { GuidePreview } from '@/components/shop/guide-preview';
-import { lookOf } from '@/components/shop/kit-look';
+import { KitStage } from '@/components/shop/kit-stage';
 import { ReadyWords } from '@/components/shop/ready-words';
 import { TuningBand } from '@/components/shop/tuning-band';
 import { earphoneWords, kHz, provideWords } from '@/components/shop/words';
 import { Breadcrumbs } from '@/components/ui/breadcrumbs';
 import { Facts, FigureText } from '@/components/ui/figure-text';
 import { readKitPage } from '@/services/catalogue';
-import { SvgDrawing } from '@/templates/drawings/as-svg';
-import { stageDrawing } from '@/templates/drawings/kit-drawing';
 import { putInBasket } from '../../actions';
 
 interface Props {
@@ -36,12 +34,7 @@ export default async function KitPage({ params }: Props) {
       <div className="mx-auto max-w-page px-4 sm:px-6">
         <Breadcrumbs trail={[{ href: '/', label: 'Kits' }]} here={kit.name} />
         <div className="grid gap-x-11 gap-y-4 md:grid-cols-[minmax(0,1.25fr)_minmax(0,1fr)]">
-          <div className="grid place-items-center border-rule bg-well max-sm:-mx-4 max-sm:border-b sm:rounded-panel sm:border">
-            <SvgDrawing
-              drawing={stageDrawing(lookOf(kit.shape), { callouts: true })}
-              className="block h-auto max-h-64 w-full sm:max-h-109"
-            />
-          </div>
+          <KitStage shape={kit.shape} />
           <div>
             <div className="flex flex-wrap items-center gap-3.5">
               <Plate kit={kit.number} version={kit.letter} />
