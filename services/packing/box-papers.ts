@@ -6,9 +6,8 @@ import type { VersionContent, VersionState } from '../kits/schemas';
 import { missing, refused } from '../problem';
 import type { Verdict } from '../receiver';
 import { reading, sha256 } from '../record';
-import { addressLines } from './address';
 import { plateOf } from './box-view';
-import { type BoxRow, findBox, inBox, linesOf } from './rows';
+import { type BoxRow, findBox, inBox, linesOf, storedAddress } from './rows';
 import { amountText } from './rules';
 import type { PlateView } from './schemas';
 import { guideCode, shortHash } from './serial';
@@ -80,7 +79,7 @@ export async function readBoxPapers(
     signOff: signOff && { by: signOff.by, at: signOff.at },
     orderNumber: box.orderNumber,
     buyer: box.buyer,
-    address: addressLines(order.address),
+    address: storedAddress(order.address),
     giftNote: order.giftNote,
     position: box.position,
     of: Number(box.of),
@@ -101,14 +100,12 @@ interface OrderOfBox {
 }
 
 const orderOf = (sql: Knex, box: BoxRow): Promise<OrderOfBox | undefined> =>
-  sql('orders')
-    .where('id', box.orderId)
-    .first<OrderOfBox | undefined>({
-      customerId: 'customer_id',
-      linkHash: 'link_hash',
-      address: 'address',
-      giftNote: 'gift_note',
-    });
+  sql('orders').where('id', box.orderId).first<OrderOfBox | undefined>({
+    customerId: 'customer_id',
+    linkHash: 'link_hash',
+    address: 'address',
+    giftNote: 'gift_note',
+  });
 
 async function printedLines(sql: Knex, box: BoxRow): Promise<BoxPapers['lines']> {
   const picked = await inBox(sql, box.id);

@@ -2,9 +2,8 @@ import type { Knex } from 'knex';
 import { type Actor, must } from '../access';
 import type { OrderId } from '../ids';
 import { reading } from '../record';
-import { addressLines } from './address';
 import { plateOf } from './box-view';
-import { boxesOf } from './rows';
+import { boxesOf, storedAddress } from './rows';
 import type { DispatchView } from './schemas';
 
 /** Packed orders that wait for the carrier, oldest first, and the last ones handed over. */
@@ -18,7 +17,7 @@ export async function readDispatch(actor: Actor): Promise<DispatchView> {
         orderId: order.id,
         orderNumber: order.number,
         buyer: order.name,
-        address: addressLines(order.address),
+        address: storedAddress(order.address),
         delivery: order.delivery ?? order.deliveryCode,
         boxes: (await boxesOf(sql, order.id)).map((box) => ({
           id: box.id,

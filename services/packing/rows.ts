@@ -2,11 +2,12 @@ import type { Knex } from 'knex';
 import type { BinId, BoxId, LineId, LotId, OrderId, VersionId } from '../ids';
 import { newId } from '../ids';
 import type { VersionState } from '../kits/schemas';
+import { Address } from '../orders/schemas';
 import type { PartUnit } from '../parts/schemas';
 import { missing } from '../problem';
 import type { Tx } from '../record';
 import type { Instant } from '../time';
-import { type Fulfilment, claimHolds } from './rules';
+import { type Fulfilment, addressLines, claimHolds } from './rules';
 import type { BoxState, LotPlace } from './schemas';
 
 /** A box row with the names a person needs around it. */
@@ -95,6 +96,9 @@ export async function getBox(sql: Knex, boxId: string): Promise<BoxRow> {
 export async function findBoxBySerial(sql: Knex, serial: string): Promise<BoxRow | undefined> {
   return boxes(sql).where('boxes.serial', serial).first();
 }
+
+/** The address of an order as lines of a label. */
+export const storedAddress = (text: string): string[] => addressLines(Address.parse(JSON.parse(text)));
 
 export const boxesOf = (sql: Knex, orderId: string): Promise<BoxRow[]> =>
   boxes(sql).where('boxes.order_id', orderId).orderBy('boxes.position');

@@ -1,5 +1,6 @@
 import { lineMass } from '../kits/rules';
 import type { VersionContent, VersionState } from '../kits/schemas';
+import type { Address } from '../orders/schemas';
 import type { PartUnit } from '../parts/schemas';
 import { type Instant, days, minutes, showClock } from '../time';
 import type { BoxState, LotPlace, MassView } from './schemas';
@@ -176,6 +177,14 @@ export function closeBlockers(box: Closing): string[] {
   if (box.slipPrintedAt === null) reasons.push('The packing slip is not printed.');
   if (!box.mass.fits) reasons.push(box.mass.weighed === null ? 'The box is not weighed.' : box.mass.sentence);
   return reasons;
+}
+
+const regions = new Intl.DisplayNames('en-GB', { type: 'region' });
+
+/** The lines of an address label, top to bottom, without empty ones; the country stands alone on the last. */
+export function addressLines({ line1, line2, town, postcode, country }: Address): string[] {
+  const place = [town, postcode].filter((part) => part !== '').join(', ');
+  return [line1, line2, place, regions.of(country) ?? country].filter((line) => line !== '');
 }
 
 /** Says who has a box that somebody else wants. */

@@ -4,9 +4,8 @@ import { readSignOff } from '../check';
 import { frozenContent } from '../kits';
 import { missing, Problem } from '../problem';
 import { reading } from '../record';
-import { addressLines } from './address';
 import { plateOf } from './box-view';
-import { type BoxRow, boxes, findBoxBySerial, findLot, linesOf } from './rows';
+import { type BoxRow, boxes, findBoxBySerial, findLot, linesOf, storedAddress } from './rows';
 import { amountText } from './rules';
 import type { LotTrace, TraceView } from './schemas';
 
@@ -61,7 +60,7 @@ async function buyerOf(sql: Knex, box: BoxRow): Promise<TraceView['buyer']> {
   const order = await sql('orders')
     .where('id', box.orderId)
     .first<{ name: string; email: string; address: string } | undefined>('name', 'email', 'address');
-  return order ? { name: order.name, email: order.email, address: addressLines(order.address) } : null;
+  return order ? { name: order.name, email: order.email, address: storedAddress(order.address) } : null;
 }
 
 async function shipmentOf(sql: Knex, box: BoxRow): Promise<TraceView['shipment']> {

@@ -1,0 +1,106 @@
+import type { FrozenLine } from '../kits/schemas';
+import { amountText } from '../packing/rules';
+import type { PartValues } from '../parts/schemas';
+import { showCapacitance, showResistance } from '../quantity';
+import { capacitorCode, resistorBands } from './markings';
+import type { GuidePart } from './schemas';
+
+/**
+ * Narrow no-break blanks and other signs that the printed faces do not hold would be set in a face that is not
+ * embedded; a plain no-break blank says the same.
+ */
+export const printable = (text: string) => text.replace(/[\u2009\u202f]/g, '\u00a0').replace(/\u00b5/g, '\u03bc');
+
+/** The drawing of a part's family by its kind; a pair of capsules on a band is drawn as a headset. */
+export function familyOf(values: PartValues): string {
+  switch (values.kind) {
+    case 'coil-former':
+      return 'coil-tube';
+    case 'wire':
+      return 'reel';
+    case 'variable-capacitor':
+      return 'vanes';
+    case 'foil-capacitor':
+      return 'foil-plates';
+    case 'fixed-capacitor':
+      return 'fixed-capacitor';
+    case 'earphone':
+      return values.earphoneKind === 'ceramic' ? 'earpiece' : 'headset';
+    case 'aerial-wire':
+      return 'aerial';
+    case 'earth-lead':
+      return 'earth';
+    case 'hardware':
+      return 'terminal';
+    case 'print':
+      return 'guide';
+    case 'packaging':
+      return 'box';
+    case 'resistor':
+    case 'detector':
+    case 'transformer':
+    case 'tool':
+      return values.kind;
+  }
+}
+
+/** Hardware is one kind of many shapes; its name tells a board and a knob from a terminal. */
+export function familyOfPart(part: { name: string; values: PartValues }): string {
+  if (part.values.kind !== 'hardware') return familyOf(part.values);
+  if (/\bboard\b|\bbase\b/i.test(part.name)) return 'board';
+  if (/\bknob\b/i.test(part.name)) return 'knob';
+  if (/\bterminal|\bpost|\bclip/i.test(part.name)) return 'terminal';
+  return 'packet';
+}
+
+/** How to recognise a part that carries a code, so that a 10 pF marked 100 is not taken for 100 pF. */
+export function markingOf(values: PartValues): string {
+  if (values.kind === 'resistor') {
+    const bands = resistorBands(values.r.nominal, values.r.tol);
+    return bands ? `bands ${bands.join(', ')}` : '';
+  }
+  if (values.kind === 'fixed-capacitor') {
+    const code = capacitorCode(values.c.nominal);
+    return code === null ? '' : `marked ${code}`;
+  }
+  if (values.kind === 'detector') return 'band at one end';
+  return '';
+}
+
+/** The value that stands beside a part in the circuit drawing. */
+export function valueOf(values: PartValues): string {
+  switch (values.kind) {
+    case 'variable-capacitor':
+      return `${figure(showCapacitance(values.min.nominal))} to ${printable(showCapacitance(values.max.nominal))}`;
+    case 'foil-capacitor':
+      return 'foil plates';
+    case 'fixed-capacitor':
+      return printable(showCapacitance(values.c.nominal));
+    case 'resistor':
+      return printable(showResistance(values.r.nominal));
+    case 'earphone':
+      return values.earphoneKind === 'ceramic' ? 'crystal' : printable(showResistance(values.rDc.nominal));
+    case 'detector':
+      return values.detectorClass.replaceAll('-', ' ');
+    case 'transformer':
+      return `${values.ratio} to 1`;
+    default:
+      return '';
+  }
+}
+
+const figure = (text: string) => printable(text).split('\u00a0')[0] ?? text;
+
+export function guidePart(line: FrozenLine): GuidePart | null {
+  if (!line.part) return null;
+  const { part } = line;
+  const isCut = part.unit !== 'each';
+  return {
+    reference: line.reference,
+    name: printable(part.name),
+    family: familyOfPart(part),
+    amount: printable(isCut ? amountText(line.quantity, part.unit) : String(line.quantity)),
+    marking: markingOf(part.values),
+    note: printable(line.note),
+  };
+}

@@ -1,0 +1,6 @@
+import type { GuideView, PaperSize } from '@/services/documents/schemas';
+
+export interface GuideProps {
+  view: GuideView;
+  size: PaperSize;
+}
