@@ -2,7 +2,7 @@
  * A process of its own that buys, for tests of two processes on one file.
  * Arguments: the database file, the version, how many buyers at once. Prints one JSON line: how many got a kit.
  */
-import { openDatabase, setDatabase as chooseDatabase } from '@/db/client';
+import { openDatabase, setDatabase } from '@/db/client';
 import { visitor } from '@/services/access';
 import { newId } from '@/services/ids';
 import { changeBasket, placeOrder } from '@/services/orders';
@@ -11,7 +11,7 @@ import { VersionId } from '@/services/ids';
 
 const [filename = '', version = '', count = '1'] = process.argv.slice(2);
 const sql = openDatabase(filename, { busyTimeoutMs: 5000 });
-chooseDatabase(sql);
+setDatabase(sql);
 
 async function buy(): Promise<string> {
   const basketId = newId();
