@@ -21,9 +21,10 @@ function scaled(x: number, k: number): number {
     base *= base;
     n = (n - (n % 2)) / 2;
   }
-  let result = x * power;
-  for (let i = 0; i < half; i += 1) result *= k < 0 ? 0.5 : 2;
-  return result;
+  // Below the normal range the rest goes on in one step: several would round several times.
+  let rest = 1;
+  for (let i = 0; i < half; i += 1) rest *= k < 0 ? 0.5 : 2;
+  return x * power * rest;
 }
 
 /** e to the power x. Above 709.78 infinity, below -745.2 zero. */
