@@ -16,26 +16,26 @@ export function CheckoutSum({ basket, method, total, children }: CheckoutSumProp
       <h2 id="sum" className="mb-3 font-display text-panel">
         Your order
       </h2>
-      <dl className="grid grid-cols-[1fr_auto] gap-x-4 gap-y-2">
+      <dl className="grid grid-cols-[1fr_auto] gap-y-2">
         {basket.lines.map((line) => (
           <div key={line.versionId} className="contents">
             <dt>
               {line.quantity} {line.name}, No. {line.number}&#8239;{line.letter}
             </dt>
-            <dd className="text-right font-figures font-semibold">{line.total && formatMoney(line.total)}</dd>
+            <dd className="pl-4 text-right font-figures font-semibold">{line.total && formatMoney(line.total)}</dd>
           </div>
         ))}
         {method && (
           <div className="contents">
             <dt>{method.name}</dt>
-            <dd className="text-right font-figures font-semibold">{method.price}</dd>
+            <dd className="pl-4 text-right font-figures font-semibold">{method.price}</dd>
           </div>
         )}
         <div className="contents">
           <dt className="border-t-1.5 border-ink pt-2 font-bold">In all, tax included</dt>
           <dd
             aria-live="polite"
-            className="border-t-1.5 border-ink pt-2 text-right font-figures text-value font-semibold"
+            className="border-t-1.5 border-ink pt-2 pl-4 text-right font-figures text-value font-semibold"
           >
             {total}
           </dd>

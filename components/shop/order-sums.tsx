@@ -25,25 +25,25 @@ export function OrderSums({ order }: { order: OrderView }) {
         <h2 id="sums" className="mb-2 font-display text-panel">
           What it costs
         </h2>
-        <dl className="grid grid-cols-[1fr_auto] gap-x-4 gap-y-1.5">
+        <dl className="grid grid-cols-[1fr_auto] gap-y-1.5">
           {rows.map(({ term, value }) => (
             <div key={term} className="contents">
               <dt>{term}</dt>
-              <dd className="text-right font-figures">{value}</dd>
+              <dd className="pl-4 text-right font-figures">{value}</dd>
             </div>
           ))}
           <div className="contents font-bold">
             <dt className="border-t-1.5 border-ink pt-1.5">In all</dt>
-            <dd className="border-t-1.5 border-ink pt-1.5 text-right font-figures">{formatMoney(order.total)}</dd>
+            <dd className="border-t-1.5 border-ink pt-1.5 pl-4 text-right font-figures">{formatMoney(order.total)}</dd>
           </div>
           <div className="contents text-caption text-ink2">
             <dt>of that, tax at {order.taxBasisPoints / 100}&#8239;%</dt>
-            <dd className="text-right font-figures">{formatMoney(order.tax)}</dd>
+            <dd className="pl-4 text-right font-figures">{formatMoney(order.tax)}</dd>
           </div>
           {order.refunded.minor > 0 && (
             <div className="contents font-bold">
               <dt>Paid back</dt>
-              <dd className="text-right font-figures">{formatMoney(order.refunded)}</dd>
+              <dd className="pl-4 text-right font-figures">{formatMoney(order.refunded)}</dd>
             </div>
           )}
         </dl>

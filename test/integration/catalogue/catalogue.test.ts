@@ -41,7 +41,7 @@ describe('the catalogue', () => {
 
   it('a kit page tells what is in the box and how it was checked; a held kit has none', async () => {
     const page = await readKitPage(visitor, 'el7');
-    expect(page.box.map((item) => item.reference)).toEqual(['L1', 'W1', 'C1', 'D1', 'E1', 'A1']);
+    expect(page.box.map((item) => item.reference)).toEqual(['L1', 'W1', 'C1', 'C2', 'D1', 'R1', 'E1', 'A1']);
     expect(page.check).toMatchObject({ by: 'Walter Tarrow', contentHash: lamp.contentHash });
     expect(page.cautions).toHaveLength(9);
     expect(page.contour?.f.length).toBeGreaterThan(5);
