@@ -89,7 +89,7 @@ function Sentences({ text }: { text: string }) {
   return (
     <View style={{ flexDirection: 'row', flexWrap: 'wrap', columnGap: 20, rowGap: 8 }}>
       {actions.map((action, index) => (
-        <View key={action} wrap={false} style={{ flexDirection: 'row', width: (measure - 20) / 2 }}>
+        <View key={index} wrap={false} style={{ flexDirection: 'row', width: (measure - 20) / 2 }}>
           <Text style={{ ...type.section, fontSize: 22, lineHeight: 1, width: 28, marginTop: -5 }}>{index + 1}</Text>
           <Text style={{ ...type.body, flexGrow: 1, flexBasis: 0 }}>{action}</Text>
         </View>

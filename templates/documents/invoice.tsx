@@ -4,7 +4,7 @@ import type { PaperSize } from '@/services/documents/schemas';
 import type { Invoice } from '@/services/orders/schemas';
 import { addressLines } from '@/services/packing/rules';
 import { showDate } from '@/services/time';
-import { Papers, black, grey, hair, measure, sheetOf, type } from './sheet';
+import { Papers, black, hair, measure, sheetOf, type } from './sheet';
 
 const columns = { quantity: 56, unit: 82, total: 90 };
 
@@ -27,8 +27,8 @@ export function InvoicePaper({ view, size }: { view: Invoice; size: PaperSize })
           </View>
           <View style={{ alignItems: 'flex-end' }}>
             <Text style={{ ...type.plate, fontSize: 14 }}>{view.seller.name}</Text>
-            {view.seller.lines.map((line) => (
-              <Text key={line} style={type.body}>
+            {view.seller.lines.map((line, index) => (
+              <Text key={index} style={type.body}>
                 {line}
               </Text>
             ))}
@@ -40,8 +40,8 @@ export function InvoicePaper({ view, size }: { view: Invoice; size: PaperSize })
         <View style={{ flexDirection: 'row', gap: 24, paddingVertical: 16 }}>
           <View style={{ width: 240 }}>
             <Text style={head}>Bill to</Text>
-            {[view.buyer.name, ...addressLines(view.buyer.address)].map((line) => (
-              <Text key={line} style={{ ...type.body, fontSize: 12 }}>
+            {[view.buyer.name, ...addressLines(view.buyer.address)].map((line, index) => (
+              <Text key={index} style={{ ...type.body, fontSize: 12 }}>
                 {line}
               </Text>
             ))}

@@ -61,20 +61,25 @@ function Head({ view }: { view: SlipView }) {
 function Facts({ view }: { view: SlipView }) {
   return (
     <View style={{ flexDirection: 'row', gap: 18, paddingTop: 8, paddingBottom: 6 }}>
-      <Fact label="Send to" lines={view.sendTo} width={220} />
-      <Fact
-        label="Packed"
-        lines={view.packed ? [view.packed.on, `by ${view.packed.by}`] : ['not packed yet']}
-        width={150}
-      />
-      <Fact
-        label="Weight"
-        lines={[
-          view.weight.weighed === null ? 'not weighed yet' : `${view.weight.weighed} kg on the scale`,
-          `${view.weight.expected} kg expected`,
-        ]}
-        width={130}
-      />
+      <Fact label="Send to" lines={view.sendTo} width={200} />
+      <View style={{ flexGrow: 1, flexBasis: 0, gap: 4 }}>
+        <View style={{ flexDirection: 'row', gap: 18 }}>
+          <Fact
+            label="Packed"
+            lines={view.packed ? [view.packed.on, `by ${view.packed.by}`] : ['not packed yet']}
+            width={150}
+          />
+          <Fact
+            label="Weight"
+            lines={[
+              view.weight.weighed === null ? 'not weighed yet' : `${view.weight.weighed} kg on the scale`,
+              `${view.weight.expected} kg expected`,
+            ]}
+            width={130}
+          />
+        </View>
+        {view.giftNote !== '' && <Fact label="With this gift" lines={[view.giftNote]} width={298} />}
+      </View>
     </View>
   );
 }
@@ -83,8 +88,8 @@ function Fact({ label, lines, width }: { label: string; lines: readonly string[]
   return (
     <View style={{ width }}>
       <Text style={{ ...type.small, fontWeight: 600 }}>{label}</Text>
-      {lines.map((line) => (
-        <Text key={line} style={{ ...type.body, fontSize: 11.5, lineHeight: 1.3 }}>
+      {lines.map((line, index) => (
+        <Text key={index} style={{ ...type.body, fontSize: 11.5, lineHeight: 1.3 }}>
           {line}
         </Text>
       ))}
@@ -144,12 +149,6 @@ function Contents({ view, height }: { view: SlipView; height: number }) {
 function Foot({ view }: { view: SlipView }) {
   return (
     <View wrap={false} style={{ marginTop: 6 }}>
-      {view.giftNote !== '' && (
-        <View style={{ borderWidth: 1.1, borderColor: black, borderRadius: 5, padding: 8, marginBottom: 10 }}>
-          <Text style={{ ...type.small, fontWeight: 600 }}>With this gift</Text>
-          <Text style={type.body}>{view.giftNote}</Text>
-        </View>
-      )}
       <View style={{ flexDirection: 'row', gap: 22, alignItems: 'flex-end' }}>
         <Text style={{ ...type.body, flexGrow: 1, flexBasis: 0 }}>{view.missing}</Text>
         {view.signOff && (

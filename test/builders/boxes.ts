@@ -1,7 +1,8 @@
 import type { Actor } from '@/services/access';
-import { KitId, VersionId, newId } from '@/services/ids';
+import { KitId, OrderId, VersionId, newId } from '@/services/ids';
 import { evaluateContent } from '@/services/kits/evaluation';
 import { CautionCode, type FrozenLine, VersionContent } from '@/services/kits/schemas';
+import { orderKey } from '@/services/orders';
 import { partKinds, type PartValues, type Place } from '@/services/parts/schemas';
 import { canonicalJson, now, reading, sha256, write } from '@/services/record';
 import { allocate, needsOf, reserve } from '@/services/stock';
@@ -357,7 +358,7 @@ export async function paidOrder(
 ): Promise<{ orderId: string; number: string; linkKey: string }> {
   const orderId = newId();
   const number = `Y-${4100 + ++orderCount}`;
-  const linkKey = `key of ${number}`;
+  const linkKey = orderKey(OrderId.parse(orderId));
   const at = more.paidAt ?? now();
   await reading()('orders').insert({
     id: orderId,
