@@ -120,7 +120,7 @@ async function fulfil(orderId: OrderId, fate: Fate, roll: (below: number) => num
   const boxes = await packing.boxesOfOrder(reading(), orderId);
   for (const box of boxes) await packBox(packer, BoxId.parse(box.id), fate === 'picking' ? 'picking' : 'closed');
   if (fate !== 'shipped') return;
-  pass(120);
+  pass(20);
   await packing.ship(packer, {
     orderId,
     carrier: 'Cantred Carriers',
@@ -141,11 +141,11 @@ export async function fillOrders(): Promise<void> {
     )
     .sort((a, b) => a.day - b.day);
   for (const { fate, day } of plan) {
-    goTo(Math.floor(day), 9, Math.floor((day % 1) * 400));
+    goTo(Math.floor(day), 8, Math.floor((day % 1) * 560));
     const orderId = await order(roll, onSale);
     if (fate === 'awaiting') continue;
     if (fate === 'lapsed') {
-      pass(60);
+      pass(45);
       await orders.lapseReservations(systemActor('worker'));
       continue;
     }
@@ -158,7 +158,7 @@ export async function fillOrders(): Promise<void> {
       continue;
     }
     if (fate === 'allocated') continue;
-    pass(60 * (2 + roll(20)));
+    pass(25 + roll(90));
     await fulfil(orderId, fate, roll);
   }
 }

@@ -23,7 +23,11 @@ export async function fillStore(ids: PartIds): Promise<void> {
     for (const delivery of [1, 2]) {
       goTo(delivery === 1 ? 2 : 20, 8, index % 60);
       const pieces = (delivery === 1 ? 60 : 40) + roll(80);
-      const quantity = isWire ? pieces * 15_000 : part.values.kind === 'hardware' ? pieces * 12 : pieces;
+      const quantity = isWire
+        ? pieces * 15_000
+        : ['hardware', 'packaging'].includes(part.values.kind)
+          ? pieces * 12
+          : pieces;
       await stock.receiveLot(packer, {
         partId,
         lotCode: `L${delivery}${String(index + 1).padStart(3, '0')}-${part.code.slice(0, 12)}`,

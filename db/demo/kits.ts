@@ -1,6 +1,6 @@
 import type { Circuit, KitBand, NewKit } from '@/services/kits/schemas';
 import type { Place } from '@/services/parts/schemas';
-import { stations } from './people';
+import { longWaveStations, stations } from './people';
 
 const wave = (code: string, lo: number, hi: number, first: number, last: number, step = 9): KitBand => ({
   code,
@@ -34,6 +34,7 @@ export interface DemoSet {
   aerial: string;
   vertical: number;
   horizontal: number;
+  longWave?: boolean;
 }
 
 export interface DemoVersion {
@@ -69,28 +70,6 @@ const withCrystal = { earphone: 'E-CR1', returnResistor: 'R-47K' } as const;
 const shortWire = { aerial: 'A-18', vertical: 5, horizontal: 12 } as const;
 
 export const demoKits: DemoKit[] = [
-  {
-    kit: {
-      code: 'MW7',
-      number: 7,
-      name: 'Ebb Lamp',
-      summary: 'The whole medium wave on one coil and a big air capacitor. Two evenings and a flat screwdriver.',
-      audience: 'Builders who have made one set before',
-      ageFrom: 12,
-      band: mediumWave,
-    },
-    pence: 5800,
-    versions: [
-      {
-        set: { ...ebbLamp, turns: 64 },
-        fate: 'held',
-        by: 'Isolde Hark',
-        remark: 'The low end is out of reach. More turns, and send it again.',
-      },
-      { set: ebbLamp, fate: 'released', by: 'Isolde Hark' },
-      { set: { ...ebbLamp, capacitor: 'C-365', turns: 80 }, fate: 'draft', by: 'Isolde Hark' },
-    ],
-  },
   {
     kit: {
       code: 'MW4',
@@ -176,7 +155,15 @@ export const demoKits: DemoKit[] = [
     pence: 6400,
     versions: [
       {
-        set: { ...ebbLamp, former: 'F-90T', wire: 'W-315', turns: 222, capacitor: 'C-500', couplingCapacitor: 'CC-33' },
+        set: {
+          ...ebbLamp,
+          former: 'F-90T',
+          longWave: true,
+          wire: 'W-315',
+          turns: 222,
+          capacitor: 'C-500',
+          couplingCapacitor: 'CC-33',
+        },
         fate: 'released',
         by: 'Isolde Hark',
       },
@@ -275,6 +262,28 @@ export const demoKits: DemoKit[] = [
       },
     ],
   },
+  {
+    kit: {
+      code: 'MW7',
+      number: 7,
+      name: 'Ebb Lamp',
+      summary: 'The whole medium wave on one coil and a big air capacitor. Two evenings and a flat screwdriver.',
+      audience: 'Builders who have made one set before',
+      ageFrom: 12,
+      band: mediumWave,
+    },
+    pence: 5800,
+    versions: [
+      {
+        set: { ...ebbLamp, turns: 64 },
+        fate: 'held',
+        by: 'Isolde Hark',
+        remark: 'The low end is out of reach. More turns, and send it again.',
+      },
+      { set: ebbLamp, fate: 'released', by: 'Isolde Hark' },
+      { set: { ...ebbLamp, capacitor: 'C-365', turns: 80 }, fate: 'draft', by: 'Isolde Hark' },
+    ],
+  },
 ];
 
 export const circuitOf = (set: DemoSet): Circuit => ({
@@ -294,7 +303,7 @@ export const circuitOf = (set: DemoSet): Circuit => ({
   },
   earth: { kind: 'resistance', r: { nominal: 50, tol: 1, dist: 'log-uniform' } },
   stray: { nominal: 5e-12, tol: 0.4, dist: 'uniform' },
-  place: { field: 0.01, stations },
+  place: { field: 0.01, stations: set.longWave ? longWaveStations : stations },
 });
 
 type DemoLine = [reference: string, place: Place, code: string, quantity: number];

@@ -59,3 +59,10 @@ export const stations = [
   { name: 'Old Mill', f: 1_458_000, field: 0.007 },
   { name: 'Cape', f: 1_593_000, field: 0.012 },
 ];
+
+export const longWaveStations = [
+  { name: 'Great Fen', f: 162_000, field: 0.018 },
+  { name: 'Northern Mast', f: 198_000, field: 0.024 },
+  { name: 'Strand', f: 234_000, field: 0.007 },
+  { name: 'Outer Bank', f: 270_000, field: 0.005 },
+];
