@@ -2,13 +2,14 @@ import type { Instrumentation } from 'next';
 
 /** Before the first request: a missing or bad variable stops the start with a sentence that names it. */
 export async function register(): Promise<void> {
-  if (process.env['NEXT_RUNTIME'] !== 'nodejs') return;
-  const { parseEnv } = await import('./services/env');
-  try {
-    parseEnv(process.env);
-  } catch (error) {
-    console.error(error instanceof Error ? error.message : error);
-    process.exit(1);
+  if (process.env.NEXT_RUNTIME === 'nodejs') {
+    const { parseEnv } = await import('./services/env');
+    try {
+      parseEnv(process.env);
+    } catch (error) {
+      console.error(error instanceof Error ? error.message : error);
+      process.exit(1);
+    }
   }
 }
 

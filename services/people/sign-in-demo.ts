@@ -20,7 +20,10 @@ export async function signInDemo(actor: Actor, input: { personId: string }): Pro
   return write(actor, async (tx) => {
     const person = await rows.getPerson(tx.sql, personId);
     if (person.disabledAt !== null) throw missing('This person has left the yard. Choose another one.');
-    await record(tx, 'person.signed-in', { subject: { kind: 'person', id: person.id }, after: { by: 'demo' } });
+    await record({ ...tx, actor: rows.toActor(person) }, 'person.signed-in', {
+      subject: { kind: 'person', id: person.id },
+      after: { by: 'demo' },
+    });
     return { personId: person.id };
   });
 }

@@ -30,7 +30,7 @@ export async function signInWithLink(actor: Actor, input: UseLink, browser: stri
       await record(tx, 'password.removed', { subject, reason: 'forgotten, shown by a one-time link' });
     }
     await forgetTries(tx, `account:${blind(person.email)}`);
-    await record(tx, 'person.signed-in', { subject, after: { by: 'link' } });
+    await record({ ...tx, actor: rows.toActor(person) }, 'person.signed-in', { subject, after: { by: 'link' } });
     return { personId: person.id };
   });
 }

@@ -41,7 +41,10 @@ export async function signInWithPassword(actor: Actor, input: SignIn, origin: Or
     if (person.kind === 'staff') await useFactor(tx, person, code);
     await forgetTries(tx, key);
     if (stronger && person.passwordHash) await rows.replaceHash(tx.sql, person.id, person.passwordHash, stronger);
-    await record(tx, 'person.signed-in', { subject: { kind: 'person', id: person.id }, after: { by: 'password' } });
+    await record({ ...tx, actor: rows.toActor(person) }, 'person.signed-in', {
+      subject: { kind: 'person', id: person.id },
+      after: { by: 'password' },
+    });
     return { personId: person.id };
   });
 }

@@ -39,8 +39,8 @@ export default async function InvitationPage({ params }: { params: Promise<{ tok
       </p>
       <div className="mt-6 grid items-start gap-6 md:grid-cols-2">
         <Panel title="1. Your authenticator" note="An app that shows a new code each half minute.">
-          <p className="mb-4">Take a picture of this code with it, or type the letters below.</p>
-          <QrCode qr={invitation.qr} label="Code for your authenticator; the letters below say the same" />
+          <p className="mb-4">Point it at these squares, or type the letters below.</p>
+          <QrCode qr={invitation.qr} label="Squares that an authenticator reads; the letters below say the same" />
           <p className="mt-4 font-figures font-semibold break-all">{inFours(invitation.secret)}</p>
           <p className="mt-2">
             <a className="link" href={invitation.uri}>
