@@ -30,10 +30,14 @@ export function RemedyCards({ band, remedies, onTry }: RemedyCardsProps) {
               <Sign kind={remedy.stops.length === 0 ? 'clears' : 'stops'} size={18} className="mt-0.5 shrink-0" />
               {remedy.text}
             </p>
-            <p className="text-caption text-ink2">
-              {`Reaches ${kHz(remedy.reach.nominal.lo)} to ${kHz(remedy.reach.nominal.hi)} kHz.`}
-            </p>
-            <ReachRail band={band} nominal={remedy.reach.nominal} worst={remedy.reach.corners} size="list" />
+            {remedy.reach && (
+              <>
+                <p className="text-caption text-ink2">
+                  {`Reaches ${kHz(remedy.reach.nominal.lo)} to ${kHz(remedy.reach.nominal.hi)} kHz.`}
+                </p>
+                <ReachRail band={band} nominal={remedy.reach.nominal} worst={remedy.reach.corners} size="list" />
+              </>
+            )}
             {remedy.stops[0] !== undefined && (
               <p className="text-caption font-semibold text-crimson">{remedy.stops[0]}</p>
             )}

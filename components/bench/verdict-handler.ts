@@ -56,6 +56,7 @@ function settingsOf(design: DesignInput, verdict: Verdict): ResponseSetting[] {
 /** Each remedy that a press can apply, with what the version comes to under the same tolerances. */
 function triedRemedies(content: VersionContent, findings: readonly Finding[]): TriedRemedy[] {
   const tried: TriedRemedy[] = [];
+  const stoodBefore = new Set(stopsIn(findings).map(({ code }) => code));
   for (const { code, remedy } of findings) {
     if (!remedy || tried.length === MOST_REMEDIES || tried.some(({ text }) => text === remedy.text)) continue;
     const changed = settingsFrom(content, remedy.changes);
@@ -65,11 +66,14 @@ function triedRemedies(content: VersionContent, findings: readonly Finding[]): T
     if (!design) continue;
     const verdict = evaluateOrNull(design);
     if (!verdict) continue;
+    const left = stopsIn(allFindings(verdict, next)).filter(
+      (stop) => stop.code === code || !stoodBefore.has(stop.code),
+    );
     tried.push({
       text: remedy.text,
       code,
-      reach: verdict.reach,
-      stops: stopsIn(allFindings(verdict, next)).map(({ message }) => message),
+      reach: changed.circuit === content.circuit ? null : verdict.reach,
+      stops: left.map(({ message }) => message),
     });
   }
   return tried;

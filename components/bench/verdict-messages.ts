@@ -16,8 +16,9 @@ export interface TriedRemedy {
   text: string;
   /** Finding that asks for it. */
   code: string;
-  reach: Verdict['reach'];
-  /** What stops it then, a sentence each. */
+  /** Null where the set stays as it is and only a quantity changes. */
+  reach: Verdict['reach'] | null;
+  /** What it leaves unmended, or spoils: a sentence each. */
   stops: string[];
 }
 

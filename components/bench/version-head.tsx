@@ -6,7 +6,8 @@ import { LinkButton } from '@/components/ui/link-button';
 import { TabLinks } from '@/components/ui/tab-links';
 import { latestLetter, letterAfter } from '@/services/kits/rules';
 import type { VersionView } from '@/services/kits/schemas';
-import { showKHz } from '@/services/quantity';
+import { bandName } from '@/services/catalogue/rules';
+import { shownKHz } from '@/templates/drawings/reach-axis';
 
 export interface VersionHeadProps {
   view: VersionView;
@@ -25,7 +26,7 @@ export function VersionHead({ view, page, onStart, starting = false }: VersionHe
       <div className="flex flex-wrap items-baseline gap-x-4 gap-y-1">
         <h1 className="font-display text-section sm:text-[30px] sm:leading-9">{kit.name}</h1>
         <p className="text-caption text-ink2">
-          {`No. ${kit.number}, ${showKHz(kit.band.lo)} to ${showKHz(kit.band.hi)}`}
+          {`No. ${kit.number}, ${bandName(kit.band)} ${shownKHz(kit.band.firstCarrier)} to ${shownKHz(kit.band.lastCarrier)} kHz`}
           <span className="sr-only">{`, version ${view.letter}`}</span>
         </p>
         <LinkButton

@@ -8,8 +8,8 @@ import { Button } from '@/components/ui/button';
 import { Notice } from '@/components/ui/notice';
 import { ToastRegion, useToast } from '@/components/ui/toast';
 import type { VersionId } from '@/services/ids';
-import { contentMass, fieldOf, settingsFrom, stopsIn } from '@/services/kits/rules';
-import type { LineView, StartVersion, VersionView } from '@/services/kits/schemas';
+import { contentMass, fieldOf, settingsFrom, stopsIn, wireNeeded } from '@/services/kits/rules';
+import type { LineView, StartVersion, VersionContent, VersionView } from '@/services/kits/schemas';
 import type { PartView, Place } from '@/services/parts/schemas';
 import type { ProblemView } from '@/services/problem';
 import { ConflictPanel } from './conflict-panel';
@@ -64,6 +64,7 @@ function Bench({ view, mayEdit, deeds }: WorkbenchProps) {
   const canChange = isDraft && mayEdit;
   const findings = answer?.kind === 'verdict' ? answer.live.findings : [];
   const { kit } = content;
+  const stops = stopsIn(findings).length;
 
   async function addLine(place: Place, part: PartView) {
     const letter = part.values.kind === 'coil-former' ? 'F' : referenceLetters[place];
@@ -71,7 +72,7 @@ function Bench({ view, mayEdit, deeds }: WorkbenchProps) {
       letter,
       lines.map((line) => line.reference),
     );
-    const quantity = part.unit === 'each' ? 1 : 1000;
+    const quantity = firstQuantity(content, place, part);
     setProblem(await store.addLine({ versionId: server.id, place, partId: part.id, reference, quantity, note: '' }));
   }
 
@@ -181,6 +182,13 @@ function Bench({ view, mayEdit, deeds }: WorkbenchProps) {
         onRetry={() => void store.saveNow()}
       >
         {canChange && <UndoButtons store={store} canUndo={snapshot.canUndo} canRedo={snapshot.canRedo} />}
+        {canChange && lockedReason === undefined && stops > 0 && (
+          <p className="text-caption text-ink2">
+            {stops === 1
+              ? 'One stop stands; the check room will hold it.'
+              : `${stops} stops stand; the check room will hold it.`}
+          </p>
+        )}
         {canChange && (
           <Button
             variant="primary"
@@ -196,6 +204,14 @@ function Bench({ view, mayEdit, deeds }: WorkbenchProps) {
       </FootBar>
     </main>
   );
+}
+
+/** One piece; for the wire of a coil what the winding takes, 3 % more, up to the next tenth of a metre. */
+function firstQuantity(content: VersionContent, place: Place, part: PartView): number {
+  if (part.unit === 'each') return 1;
+  const line = { reference: '', place, quantity: 1, note: '', part };
+  const needed = place === 'tuning coil' ? wireNeeded({ ...content, lines: [...content.lines, line] }) : null;
+  return needed === null ? 1000 : Math.ceil(needed * 1.03 * 10) * 100;
 }
 
 function UndoButtons({ store, canUndo, canRedo }: { store: VersionStore; canUndo: boolean; canRedo: boolean }) {

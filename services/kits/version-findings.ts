@@ -17,9 +17,8 @@ function guideMiss({ guide, lines }: VersionContent): Finding | null {
   for (const [index, step] of guide.steps.entries()) {
     if (step.title === '' || step.text === '') lacks.push(`the words of step ${index + 1}`);
   }
-  for (const code of CautionCode.options) {
-    if (!guide.cautions.includes(code)) lacks.push(`the caution "${cautions[code].title}"`);
-  }
+  const missing = CautionCode.options.filter((code) => !guide.cautions.includes(code));
+  if (missing.length > 0) lacks.push(cautionWords(missing));
   const used = new Set(guide.steps.flatMap((step) => step.uses));
   const unused = lines.filter((line) => isBuiltIn(line) && !used.has(line.reference)).map((line) => line.reference);
   if (unused.length > 0) lacks.push(`a step that uses ${unused.join(', ')}`);
@@ -34,6 +33,12 @@ function guideMiss({ guide, lines }: VersionContent): Finding | null {
     message: `The guide lacks ${lacks.join('; ')}.`,
     remedy: { text: 'Write what is missing.', changes: [] },
   };
+}
+
+function cautionWords(missing: readonly CautionCode[]): string {
+  if (missing.length === CautionCode.options.length) return 'all of its cautions';
+  if (missing.length > 3) return `${missing.length} of its cautions`;
+  return `the caution${missing.length === 1 ? '' : 's'} ${missing.map((code) => `"${cautions[code].title}"`).join(', ')}`;
 }
 
 /** Lines a builder fits into the set, so that a step of the guide has to name them. */
