@@ -33,7 +33,8 @@ export function evaluate(input: DesignInput | unknown, options: EvaluateOptions 
   within('boxes', boxes, 0, 200000);
   const design = parseDesign(input);
   const figures = survey(design, { seed, boxes, rules, onProgress, depth: 'boxes' });
-  const findings = findingsOf(figures, (found, stops) => remedyFor(found, figures, { input, seed, boxes }, stops));
+  const context = { input, seed, boxes, tried: new Map() };
+  const findings = findingsOf(figures, (found, stops) => remedyFor(found, figures, context, stops));
   const stops = findings.some((finding) => finding.severity === 'stop');
   const { audioFigures, detector, reach, margins, share, limits, coil } = figures;
   return {

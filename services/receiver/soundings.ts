@@ -34,7 +34,7 @@ export function loadAt(plan: Plan, diode: Diode, dcLoad: Ohm, f: Hertz): Load {
 }
 
 /** The circuit at one frequency with its own load. Leaves the circuit tuned and loaded there. */
-export function soundingAt(plan: Plan, diode: Diode, dcLoad: Ohm, f: Hertz): Sounding {
+export function soundingAt(plan: Plan, diode: Diode, dcLoad: Ohm, f: Hertz, want: { bandwidth: boolean }): Sounding {
   const load = loadAt(plan, diode, dcLoad, f);
   const { position, c } = tuneTo(plan, f);
   const response = responseAt(plan, c);
@@ -45,7 +45,7 @@ export function soundingAt(plan: Plan, diode: Diode, dcLoad: Ohm, f: Hertz): Sou
     position,
     gain: response(f),
     q: qAt(plan, f, c),
-    bandwidth: bandwidthAt(f, response),
+    bandwidth: want.bandwidth ? bandwidthAt(f, response) : null,
     adjacent: adjacentAt(f, plan.design.band.step, response),
   };
 }

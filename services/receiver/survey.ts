@@ -106,8 +106,8 @@ export function survey(design: Design, { seed, boxes, rules, depth, onProgress }
   const reach = {
     nominal,
     corners: depth === 'nominal' ? nominal : cornersOf(plan, points, nominal),
-    aerialHalf: aerialScaled(ready, 0.5),
-    aerialDouble: aerialScaled(ready, 2),
+    aerialHalf: depth === 'nominal' ? nominal : aerialScaled(ready, 0.5),
+    aerialDouble: depth === 'nominal' ? nominal : aerialScaled(ready, 2),
   };
   const limits = depth === 'nominal' ? [] : limitsOf(plan, points);
   const share =
@@ -119,7 +119,7 @@ export function survey(design: Design, { seed, boxes, rules, depth, onProgress }
 
   const { band } = design;
   const sound = (f: number): Sounding => {
-    const sounding = soundingAt(plan, detector.diode, dcLoad, f);
+    const sounding = soundingAt(plan, detector.diode, dcLoad, f, { bandwidth: depth !== 'nominal' });
     plan.fill(plan.nominal);
     return sounding;
   };

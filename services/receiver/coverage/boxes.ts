@@ -41,6 +41,7 @@ export function boxesOf(plan: Plan, options: BoxOptions): Share {
     covered = covers(plan, x) ? boxes : 0;
   } else {
     const sampler = samplerOf(entries, indices, seed);
+    plan.circuit.drawing = true;
     for (let box = 0; box < boxes; box += 1) {
       sampler.next(x);
       if (possible(entries, x)) {
@@ -49,6 +50,7 @@ export function boxesOf(plan: Plan, options: BoxOptions): Share {
       }
       if (onProgress !== undefined && (box + 1) % REPORT === 0) onProgress(box + 1, boxes);
     }
+    plan.circuit.drawing = false;
     plan.fill(plan.nominal);
   }
   if (onProgress !== undefined && (boxes % REPORT !== 0 || indices.length === 0)) onProgress(boxes, boxes);

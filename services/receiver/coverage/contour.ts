@@ -35,6 +35,7 @@ export function contour(input: unknown, { seed = 1, boxes = 2000, points = 61 }:
   const x = Float64Array.from(plan.nominal);
   const sampler = samplerOf(values.entries, values.spread(), seed);
   const floor = new Uint8Array(points);
+  circuit.drawing = true;
   for (let box = 0; box < boxes; box += 1) {
     sampler.next(x);
     if (!possible(values.entries, x)) continue;

@@ -61,6 +61,8 @@ export interface Circuit {
   /** Ends of the position of a slider (turns) or a variable inductance (henry). */
   positionMin: number;
   positionMax: number;
+  /** While boxes are drawn, coils that are sums over loops follow their sensitivities instead. */
+  drawing: boolean;
   /** False where a draw makes a coil that cannot be. */
   sound: boolean;
   skin: Skin;
@@ -115,6 +117,7 @@ export function emptyCircuit(): Circuit {
     foilTan: 0,
     positionMin: 0,
     positionMax: 0,
+    drawing: false,
     sound: true,
     skin: { delta: 0, f: 0, x: 0 },
     zr: new Float64Array(9),

@@ -14,6 +14,7 @@ import type { Farad, Henry, Metre } from '../units';
 import type { Winding } from '../coils/loss';
 import { cutsOf } from './cuts';
 import type { CoilFiller } from './filler';
+import { bySensitivity } from './sensitivity';
 import type { Values } from './values';
 
 /** Q without measurement where no loss formula holds (ours): multilayer, solid wire. */
@@ -292,6 +293,20 @@ export function woundFiller(design: Design, values: Values, temperature: number)
   const base = new Float64Array(9);
   const kept = new Float64Array(geometryIndices.length + 2).fill(NaN);
 
+  // A sum over loops takes up to a millisecond: too long for each of thousands of boxes.
+  const summed = coil.kind === 'spiral' || coil.kind === 'multilayer';
+  const nominal = Float64Array.from(values.entries, (entry) => entry.centre);
+  const sums = (row: Float64Array, into: Float64Array): void => {
+    geometry(row);
+    sectionsInto(into, ends, whole, wound);
+  };
+  let quick: ((base: Float64Array, x: Float64Array) => void) | null = null;
+  const quickInto = (into: Float64Array, x: Float64Array): void => {
+    quick ??= bySensitivity(nominal, geometryIndices, sums);
+    quick(into, x);
+    geometry(x);
+  };
+
   const fill: CoilFiller = (x, circuit, position) => {
     const turns = tuning.kind === 'slider' ? position : whole;
     let same = kept[0] === turns && kept[1] === at(x, temperature);
@@ -310,7 +325,8 @@ export function woundFiller(design: Design, values: Values, temperature: number)
     if (!same) {
       geometry(x);
       wound.turns = turns;
-      sectionsInto(base, ends, turns, wound);
+      if (circuit.drawing && summed) quickInto(base, x);
+      else sectionsInto(base, ends, turns, wound);
       if (q === null)
         windingInto(
           circuit.winding,

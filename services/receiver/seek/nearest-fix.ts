@@ -5,7 +5,7 @@ import { rules as defaultRules, type Rules } from '../rules';
 import { survey } from '../survey';
 import type { Change } from '../verdict';
 import { knobsOf } from './knobs-of';
-import { firstClearing } from './remedy';
+import { firstClearing, type RemedyContext } from './remedy';
 
 export interface Fix {
   code: string;
@@ -40,11 +40,12 @@ export function nearestFix(
   const all = CATALOGUE.flatMap(([, look]) => look(figures));
   const before = new Set(all.filter((found) => found.severity === 'stop').map((found) => found.code));
   const fixes: Fix[] = [];
+  const context: RemedyContext = { input, seed, boxes, tried: new Map() };
   for (const found of all) {
     if (!codes.includes(found.code)) continue;
     for (const knob of knobsOf(found, figures, input)) {
       const budget = { left: found.code === 'BAND-YIELD' ? 8 : TRIES };
-      const cleared = firstClearing(knob, { found, rules, context: { input, seed, boxes }, before }, budget);
+      const cleared = firstClearing(knob, { found, rules, context, before }, budget);
       if (cleared === null) continue;
       const { step, spoils, outcome } = cleared;
       fixes.push({ code: found.code, text: step.text, changes: step.changes, reach: outcome.reach, spoils });

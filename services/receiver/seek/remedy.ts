@@ -15,6 +15,8 @@ export interface RemedyContext {
   input: unknown;
   seed: number;
   boxes: number;
+  /** Outcomes of changes already tried, by depth and changes: several findings try the same ones. */
+  tried: Map<string, Outcome | null>;
 }
 
 /** Most judgements of one finding, and of one that needs the boxes drawn each time. */
@@ -74,8 +76,14 @@ export function firstClearing(knob: Knob, search: Search, budget: { left: number
   return spoiling;
 }
 
-function tried(step: Step, { found, rules, context }: Search): Outcome | null {
-  return attempt(context.input, step.changes, { rules, seed: context.seed, boxes: context.boxes }, depthOf(found.code));
+function tried({ changes }: Step, { found, rules, context }: Search): Outcome | null {
+  const depth = depthOf(found.code);
+  const key = `${depth} ${JSON.stringify(changes)}`;
+  const known = context.tried.get(key);
+  if (known !== undefined) return known;
+  const outcome = attempt(context.input, changes, { rules, seed: context.seed, boxes: context.boxes }, depth);
+  context.tried.set(key, outcome);
+  return outcome;
 }
 
 /** An end moves one way with each knob, so the smallest step that clears it is found by doubling and halving. */

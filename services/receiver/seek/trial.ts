@@ -22,7 +22,7 @@ export interface Outcome {
 /** How far a design has to be worked out before a finding of this code can be told. */
 export function depthOf(code: string): SurveyDepth {
   if (code === 'BAND-YIELD') return 'boxes';
-  return code === 'BAND-CORNER' || code === 'DATA-NONE' ? 'corners' : 'nominal';
+  return code === 'BAND-CORNER' || code === 'BAND-AERIAL' || code === 'DATA-NONE' ? 'corners' : 'nominal';
 }
 
 /** Judges a design with changes made, no deeper than asked; null where the changed file is not valid. */
