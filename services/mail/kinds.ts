@@ -20,7 +20,5 @@ export const payloads = {
 export type MailKind = keyof typeof payloads;
 export type MailPayload<K extends MailKind> = z.infer<(typeof payloads)[K]>;
 
-export const mailKinds = Object.keys(payloads) as MailKind[]; // the keys of the table above, nothing else
-
 /** What a row of the outbox says about its mail. */
 export const MailJob = z.object({ mail: z.string(), of: z.unknown() });

@@ -6,6 +6,7 @@ import * as people from '@/services/people';
 import { setClock, write } from '@/services/record';
 import { minutes } from '@/services/time';
 import { closeTransport, send } from '@/services/worker/handlers/transport';
+import { runWorkerOnce } from '@/services/worker';
 import { emptyOutbox } from '@/services/worker/loop';
 import { testDatabase } from '@/test/builders/database';
 import { aCustomer, visit } from '../people/people';
@@ -69,6 +70,11 @@ it('the same news queued twice is one mail', async () => {
   await noLink('same');
   await emptyOutbox();
   expect(office.received).toHaveLength(1);
+});
+
+it('one round of the worker looks after reservations and payments and then sends what is due', async () => {
+  await noLink('round');
+  expect(await runWorkerOnce()).toEqual({ sent: 1, failed: 0 });
 });
 
 it('two workers at once send each mail once', async () => {
