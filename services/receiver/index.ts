@@ -20,6 +20,7 @@ export {
 export { contour, type Contour, type ContourOptions } from './coverage/contour';
 export { responseCurves } from './curves';
 export { Design, type DesignInput } from './design';
+export { dialMarks, type DialSize } from './dial';
 export { CLASS_VALUES, DETECTOR_CLASSES, type DetectorClass } from './detector/diode';
 export { DEFAULT_BOXES, DEFAULT_SEED, evaluate, type EvaluateOptions } from './evaluate';
 export { InvalidInput, type Issue } from './invalid-input';
