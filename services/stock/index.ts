@@ -7,4 +7,4 @@ export { receiveLot } from './receive-lot';
 export { reserve } from './reserve';
 export { takeOut } from './take-out';
 export { findLot, liveReservation } from './rows';
-export { availableOf, buildable, needsOf, readStore, suggestLots } from './views';
+export { availableOf, buildable, needsOf, readReceiving, readStore, suggestLots } from './views';

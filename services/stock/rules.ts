@@ -44,3 +44,19 @@ export const sayQuantity = (quantity: number, unit: PartUnit) => {
   const shown = showQuantity(quantity, unit);
   return `${shown.figure} ${shown.unit}`;
 };
+
+interface Findable {
+  code: string;
+  name: string;
+  lots: readonly { code: string; bins: readonly { code: string }[] }[];
+}
+
+/** Each word has to stand in the part's code or name, or begin the code of one of its lots or bins. */
+export function isFound({ code, name, lots }: Findable, q: string): boolean {
+  const said = `${code} ${name}`.toLowerCase();
+  const codes = lots.flatMap((lot) => [lot.code, ...lot.bins.map((bin) => bin.code)]).map((one) => one.toLowerCase());
+  return q
+    .toLowerCase()
+    .split(/\s+/)
+    .every((word) => said.includes(word) || codes.some((one) => one.startsWith(word)));
+}

@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { BinId, LotId, PartId } from '../ids';
+import { type PartKind, partKinds } from '../parts/schemas';
 
 export const LotCode = z
   .string()
@@ -62,7 +63,7 @@ export const StoredPart = z.strictObject({
   id: PartId,
   code: z.string(),
   name: z.string(),
-  kind: z.string(),
+  kind: z.custom<PartKind>((kind) => typeof kind === 'string' && Object.hasOwn(partKinds, kind)),
   unit: z.enum(['each', 'metre', 'gram']),
   onHand: z.int(),
   accepted: z.int(),
@@ -75,3 +76,10 @@ export type StoredPart = z.infer<typeof StoredPart>;
 
 export const StoreView = z.strictObject({ parts: z.array(StoredPart) });
 export type StoreView = z.infer<typeof StoreView>;
+
+/** What the form for a delivery needs of each part. */
+export const Receivable = StoredPart.pick({ id: true, code: true, name: true, unit: true }).extend({
+  /** Where other lots of it lie. */
+  bins: z.array(z.string()),
+});
+export type Receivable = z.infer<typeof Receivable>;

@@ -5,7 +5,7 @@ import type { VersionContent } from '../kits/schemas';
 import { now, reading } from '../record';
 import { type Buildable, availableFrom, buildableFrom } from './rules';
 import * as rows from './rows';
-import { type StoreView, StoreView as StoreViewSchema } from './schemas';
+import { type Receivable, type StoreView, StoreView as StoreViewSchema } from './schemas';
 
 /** What can be promised of each part now. A reservation past its time no longer counts. */
 export async function availableOf(sql: Knex, partIds: readonly string[]): Promise<Map<string, number>> {
@@ -111,6 +111,19 @@ export async function readStore(actor: Actor): Promise<StoreView> {
       };
     }),
   });
+}
+
+/** The parts that a delivery may be of, for whoever may receive one. */
+export async function readReceiving(actor: Actor): Promise<Receivable[]> {
+  must(actor, 'stock.receive');
+  const { parts } = await readStore(actor);
+  return parts.map(({ id, code, name, unit, lots }) => ({
+    id,
+    code,
+    name,
+    unit,
+    bins: [...new Set(lots.flatMap((lot) => lot.bins.map((bin) => bin.code)))],
+  }));
 }
 
 interface PartLine {

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { buildableFrom, sayQuantity, walkingOrder } from '@/services/stock/rules';
+import { buildableFrom, isFound, sayQuantity, walkingOrder } from '@/services/stock/rules';
 
 describe('how many boxes can be built', () => {
   const available = new Map([
@@ -46,4 +46,10 @@ describe('a quantity in the store', () => {
     expect(sayQuantity(2_600_000, 'metre')).toBe('2600 m');
     expect(sayQuantity(42_050, 'gram')).toBe('42.05 g');
   });
+});
+
+it('a part is found by its code, its name, a lot or a bin', () => {
+  const part = { code: 'C-365', name: 'Air capacitor', lots: [{ code: 'L-0041', bins: [{ code: 'C-14' }] }] };
+  for (const q of ['', 'c-365', 'AIR cap', 'l-0041', 'c-14', 'air c-14']) expect(isFound(part, q), q).toBe(true);
+  for (const q of ['0041', 'foil', 'air foil']) expect(isFound(part, q), q).toBe(false);
 });

@@ -1,0 +1,69 @@
+import type { Metadata } from 'next';
+import { view } from '@/app/view';
+import { PartStock } from '@/components/store/part-stock';
+import { StoreSearch } from '@/components/store/store-search';
+import { Empty } from '@/components/ui/empty';
+import { LinkButton } from '@/components/ui/link-button';
+import { Notice } from '@/components/ui/notice';
+import { can } from '@/services/access';
+import { currentActor } from '@/services/people';
+import { readStore } from '@/services/stock';
+import { isFound } from '@/services/stock/rules';
+import { accept, block } from './actions';
+
+export const metadata: Metadata = { title: 'Store' };
+
+type Search = Promise<Record<string, string | string[] | undefined>>;
+
+export default async function StorePage({ searchParams }: { searchParams: Search }) {
+  const asked = (await searchParams)['q'];
+  const q = typeof asked === 'string' ? asked.trim().slice(0, 80) : '';
+  const { parts } = await view(readStore);
+  const actor = await currentActor();
+  const found = parts.filter((part) => isFound(part, q));
+  const waiting = parts.flatMap((part) => part.lots).filter((lot) => lot.state === 'quarantine' && lot.onHand > 0);
+  return (
+    <main id="main" className="mx-auto max-w-desk px-4 py-6 sm:px-6">
+      <div className="mb-4 flex flex-wrap items-end justify-between gap-x-6 gap-y-4">
+        <h1 className="font-display text-page">On hand</h1>
+        {can(actor, 'stock.receive') && (
+          <LinkButton href="/store/receive" variant="primary" size="floor" icon="download">
+            Receive a lot
+          </LinkButton>
+        )}
+      </div>
+      <StoreSearch q={q} />
+      {waiting.length > 0 && (
+        <Notice
+          kind="note"
+          size="floor"
+          className="mt-4"
+          title={`${waiting.length} ${waiting.length === 1 ? 'lot waits' : 'lots wait'} to be inspected`}
+        >
+          {waiting.map((lot) => lot.code).join(', ')}. Nothing of {waiting.length === 1 ? 'it' : 'them'} can be promised
+          before that.
+        </Notice>
+      )}
+      {found.length === 0 ? (
+        <div className="mt-6">
+          <Empty title={q === '' ? 'The store is empty' : `No part, lot or bin matches ‘${q}’`}>
+            {q === ''
+              ? 'When a part is added to the list and its first lot received, it stands here.'
+              : 'Look by a part’s code or name, by a lot’s code, or by a bin, such as C-14.'}
+          </Empty>
+        </div>
+      ) : (
+        <ul className="mt-4 border-t-2 border-ink">
+          {found.map((part) => (
+            <PartStock
+              key={part.id}
+              part={part}
+              onAccept={can(actor, 'stock.receive') ? accept : null}
+              onBlock={can(actor, 'stock.block') ? block : null}
+            />
+          ))}
+        </ul>
+      )}
+    </main>
+  );
+}
