@@ -11,6 +11,16 @@ const config = {
   images: { unoptimized: true },
   poweredByHeader: false,
   productionBrowserSourceMaps: false,
+  // What proxy.ts does not pass: the build's own files.
+  headers: () => [
+    {
+      source: '/_next/static/:path*',
+      headers: [
+        { key: 'X-Content-Type-Options', value: 'nosniff' },
+        { key: 'Cross-Origin-Resource-Policy', value: 'same-origin' },
+      ],
+    },
+  ],
   // authInterrupts: `forbidden()` answers 403 with app/forbidden.tsx.
   experimental: { authInterrupts: true, serverActions: { bodySizeLimit: '1mb' } },
 };

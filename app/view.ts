@@ -1,7 +1,6 @@
-import 'server-only';
 import { headers } from 'next/headers';
 import { forbidden, notFound, redirect } from 'next/navigation';
-import type { Actor } from '@/services/access';
+import { type Actor, type Deed, must } from '@/services/access';
 import { currentActor } from '@/services/people';
 import { Problem } from '@/services/problem';
 
@@ -21,6 +20,16 @@ export async function view<T>(read: (actor: Actor) => Promise<T>): Promise<T> {
     forbidden();
   }
 }
+
+/**
+ * The door of a room, asked for by its layout so that the answer has its right status. Each page inside asks again for
+ * itself: a layout is not run anew when one moves between its pages.
+ */
+export const enter = (deed: Deed): Promise<Actor> =>
+  view((actor) => {
+    must(actor, deed);
+    return Promise.resolve(actor);
+  });
 
 /** The path that was asked for; `proxy.ts` notes it, since a page is not told its own address. */
 async function path(): Promise<string> {

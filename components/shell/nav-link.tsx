@@ -1,6 +1,6 @@
 'use client';
 
-import Link from 'next/link';
+import Link, { useLinkStatus } from 'next/link';
 import { usePathname } from 'next/navigation';
 import type { ReactNode } from 'react';
 
@@ -18,6 +18,20 @@ export function NavLink({ href, all, className, here, children }: NavLinkProps) 
   return (
     <Link href={href} className={`${className} ${current ? here : ''}`} {...(current && { 'aria-current': 'page' })}>
       {children}
+      <Fetching />
     </Link>
   );
+}
+
+/** Says that the next page is on its way, once that has taken long enough to be worth saying. */
+function Fetching() {
+  const { pending } = useLinkStatus();
+  return pending ? (
+    <span
+      role="status"
+      className="wait-400 fixed right-4 bottom-28 z-40 rounded-panel bg-ink px-4 py-3 font-text text-body text-paper"
+    >
+      Fetching the page
+    </span>
+  ) : null;
 }

@@ -96,12 +96,7 @@ async function judge(versionId: VersionId, { fate, remark = '', by }: DemoVersio
     await check.hold(checker, { versionId, contentHash, remark });
     return;
   }
-  const reasons = Object.fromEntries(
-    notesIn(findings).map((finding) => [
-      findingKey(finding),
-      'Seen and accepted: said in the guide and on the kit’s page.',
-    ]),
-  );
+  const reasons = Object.fromEntries(notesIn(findings).map((finding) => [findingKey(finding), reasonFor(finding)]));
   await check.release(checker, { versionId, contentHash, reasons, remark: 'Recomputed; it holds.' });
   if (fate === 'withdrawn') {
     pass(24 * 60 * 6);

@@ -46,6 +46,7 @@ const ownOrder: Rule = (actor, owned) => {
  */
 const table = {
   'account.create': anyone,
+  'account.sign-in': anyone,
   'account.read-own': signedIn,
   'account.change-own': signedIn,
   'person.list': role('owner'),
@@ -54,6 +55,7 @@ const table = {
   'invitation.accept': anyone,
   'first-owner.create': system('command'),
   'record.read': role('owner'),
+  'record.verify': either(role('owner'), system('command')),
 
   'part.read': staff,
   'part.edit': role('designer', 'owner'),
@@ -101,6 +103,7 @@ const table = {
 
   'desk.read': role('owner'),
   'mail.send': system('worker'),
+  'outbox.work': system('worker'),
   'demo.sign-in': anyone,
 } satisfies Record<string, Rule>;
 

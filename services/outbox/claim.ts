@@ -25,7 +25,7 @@ interface Row {
  * outbox is no change that anybody decides, so it leaves no line in the record; giving a job up does.
  */
 export async function claimNext(actor: Actor, kind: JobKind): Promise<Job | null> {
-  must(actor, 'mail.send');
+  must(actor, 'outbox.work');
   return write(actor, async (tx) => {
     const row = await due(tx, kind)
       .orderBy('due_at')
@@ -50,7 +50,7 @@ const due = (tx: Tx, kind: JobKind) =>
 
 /** The job is done. Does nothing when the claim has passed to another worker meanwhile. */
 export async function finish(actor: Actor, job: Job): Promise<void> {
-  must(actor, 'mail.send');
+  must(actor, 'outbox.work');
   await write(actor, async (tx) => {
     await held(tx, job).update({ state: 'done', done_at: tx.now, claimed_until: null, last_error: null });
   });
@@ -58,7 +58,7 @@ export async function finish(actor: Actor, job: Job): Promise<void> {
 
 /** The job failed: it waits for a later try, or is given up after the last one and stands in the record. */
 export async function putOff(actor: Actor, job: Job, why: string): Promise<{ givenUp: boolean }> {
-  must(actor, 'mail.send');
+  must(actor, 'outbox.work');
   return write(actor, async (tx) => {
     const wait = waitBeforeRetry(job.attempts);
     const last_error = why.slice(0, 500);

@@ -16,7 +16,7 @@ import type { Visit } from './visit';
  * for staff, who are told by mail why no link comes. Refused with a wait when too many were asked for.
  */
 export async function askForLink(actor: Actor, input: AskForLink, visit: Visit): Promise<{ email: string }> {
-  must(actor, 'account.create');
+  must(actor, 'account.sign-in');
   const { email } = parse(AskForLink, input);
   return write(actor, async (tx) => {
     await sendLink(tx, email, visit);

@@ -22,7 +22,7 @@ export async function endSession(
   actor: Actor,
   session: { sessionId: string; personId: string; endsAt: Instant },
 ): Promise<void> {
-  must(actor, 'account.create');
+  must(actor, 'account.sign-in');
   await write(actor, async (tx) => {
     await endSessionUntil(tx, session.sessionId, session.endsAt);
     await record(tx, 'person.signed-out', { subject: { kind: 'person', id: session.personId } });

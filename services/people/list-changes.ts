@@ -1,4 +1,4 @@
-import { type Actor, can, must } from '../access';
+import { type Actor, must } from '../access';
 import { parse } from '../problem';
 import { hashOfChange, reading } from '../record';
 import { type ChangeView, type ChangesView, ListChanges } from './schemas';
@@ -73,7 +73,7 @@ export type ChainReport =
  * the owner and to the command that does it on the machine itself.
  */
 export async function verifyChanges(actor: Actor): Promise<ChainReport> {
-  if (!can(actor, 'first-owner.create')) must(actor, 'record.read');
+  must(actor, 'record.verify');
   const batch = 1000;
   let head = '';
   let seq = 0;

@@ -116,13 +116,15 @@ export async function changeAndEndSessions(
 ): Promise<void> {
   await sql('people')
     .where({ id: personId })
-    .update({ ...change, session_version: sql.raw('session_version + 1') });
+    .update(change)
+    .increment('session_version', 1);
 }
 
 export async function removePassword(sql: Knex, personId: string): Promise<void> {
   await sql('people')
     .where({ id: personId, kind: 'customer' })
-    .update({ password_hash: null, session_version: sql.raw('session_version + 1') });
+    .update({ password_hash: null })
+    .increment('session_version', 1);
 }
 
 export async function replaceHash(sql: Knex, personId: string, from: string, to: string): Promise<void> {

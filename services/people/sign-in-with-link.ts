@@ -16,7 +16,7 @@ const worksOnce =
  * another browser than the one that asked. A forgotten password can be removed on the way, which ends other sessions.
  */
 export async function signInWithLink(actor: Actor, input: UseLink, browser: string): Promise<{ personId: PersonId }> {
-  must(actor, 'account.create');
+  must(actor, 'account.sign-in');
   const { token, forgetPassword } = parse(UseLink, input);
   return write(actor, async (tx) => {
     const link = await ways.findLink(tx.sql, hashOf(token));

@@ -18,7 +18,7 @@ const doesNotFit = 'That does not fit.';
  * and after the same work whatever did not fit; refused with a wait after some failures in a row.
  */
 export async function signInWithPassword(actor: Actor, input: SignIn, origin: Origin): Promise<{ personId: PersonId }> {
-  must(actor, 'account.create');
+  must(actor, 'account.sign-in');
   const { email, password, code } = parse(SignIn, input);
   const from = parse(Origin, origin);
   const found = await rows.findPerson(reading(), { email });

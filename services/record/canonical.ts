@@ -13,7 +13,8 @@ export function canonicalJson(value: unknown): string {
       .map(([key, member]) => `${JSON.stringify(key)}:${canonicalJson(member)}`);
     return `{${members.join(',')}}`;
   }
-  if (typeof value === 'number' && !Number.isFinite(value)) throw new RangeError('No canonical form for a number that is not finite.');
+  if (typeof value === 'number' && !Number.isFinite(value))
+    throw new RangeError('No canonical form for a number that is not finite.');
   return JSON.stringify(value ?? null);
 }
 

@@ -25,6 +25,17 @@ export const now = (): Instant => clock();
 /** The connection for reads that no transaction needs. */
 export const reading = (): Knex => database();
 
+/** Whether the database answers a read just now. */
+export async function isDatabaseOpen(): Promise<boolean> {
+  try {
+    await reading()('counters').select('name').first();
+    return true;
+  } catch {
+    // Whatever keeps it from answering, the one who asks wants to know only that it does.
+    return false;
+  }
+}
+
 /**
  * Runs one deed's change as a transaction that holds the write lock from its start. A lock held by another process is
  * waited for a few times; then the reader is told to try again. Any throw rolls everything back.
@@ -54,7 +65,11 @@ export async function record(
   action: string,
   change: { subject: Subject; before?: unknown; after?: unknown; reason?: string },
 ): Promise<void> {
-  const last = await tx.sql('changes').select('seq', 'hash').orderBy('seq', 'desc').first<{ seq: number; hash: string }>();
+  const last = await tx
+    .sql('changes')
+    .select('seq', 'hash')
+    .orderBy('seq', 'desc')
+    .first<{ seq: number; hash: string }>();
   const row = {
     seq: (last?.seq ?? 0) + 1,
     id: newId(),
@@ -83,7 +98,10 @@ const isBusy = (error: unknown) => codeOf(error).startsWith('SQLITE_BUSY');
 function translate(error: unknown): unknown {
   const code = codeOf(error);
   if (code === 'SQLITE_FULL' || code.startsWith('SQLITE_IOERR')) {
-    return new Problem('unavailable', 'The storage is full, so nothing was written. Reading still works; tell the owner.');
+    return new Problem(
+      'unavailable',
+      'The storage is full, so nothing was written. Reading still works; tell the owner.',
+    );
   }
   if (code === 'SQLITE_CONSTRAINT_UNIQUE' || code === 'SQLITE_CONSTRAINT_PRIMARYKEY') {
     return refused('That exists already. Look for it, or choose another name or code.');

@@ -1,18 +1,18 @@
 import Link from 'next/link';
 import type { ReactNode } from 'react';
+import { enter } from '@/app/view';
 import { HouseInitial } from '@/components/devices/wordmark';
 import { NavLink } from '@/components/shell/nav-link';
 import { PersonMenu } from '@/components/shell/person-menu';
 import { benchDoors } from '@/components/shell/rooms';
 import { SkipLink } from '@/components/shell/skip-link';
 import { Icon } from '@/components/ui/icon';
-import { currentActor } from '@/services/people';
 
 const all = benchDoors.map((door) => door.href);
 
 /** The Bench: a spine of words under icons on the left; below 900 px a bar at the foot. */
 export default async function BenchLayout({ children }: { children: ReactNode }) {
-  const actor = await currentActor();
+  const actor = await enter('kit.read-all');
   return (
     <div data-theme="auto" className="min-h-dvh md:pl-spine">
       <SkipLink />

@@ -1,17 +1,17 @@
 import Link from 'next/link';
 import type { ReactNode } from 'react';
+import { enter } from '@/app/view';
 import { Wordmark } from '@/components/devices/wordmark';
 import { NavLink } from '@/components/shell/nav-link';
 import { PersonMenu } from '@/components/shell/person-menu';
 import { checkDoors } from '@/components/shell/rooms';
 import { SkipLink } from '@/components/shell/skip-link';
-import { currentActor } from '@/services/people';
 
 const all = checkDoors.map((door) => door.href);
 
 /** The Check room: the queue is the navigation of the page; above it stand only the three piles. */
 export default async function CheckLayout({ children }: { children: ReactNode }) {
-  const actor = await currentActor();
+  const actor = await enter('version.read');
   return (
     <div data-theme="auto" className="min-h-dvh">
       <SkipLink />

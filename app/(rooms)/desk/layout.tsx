@@ -1,18 +1,18 @@
 import Link from 'next/link';
 import type { ReactNode } from 'react';
+import { enter } from '@/app/view';
 import { Wordmark } from '@/components/devices/wordmark';
 import { NavLink } from '@/components/shell/nav-link';
 import { PersonMenu } from '@/components/shell/person-menu';
 import { deskDoors, rooms } from '@/components/shell/rooms';
 import { SkipLink } from '@/components/shell/skip-link';
 import { can } from '@/services/access';
-import { currentActor } from '@/services/people';
 
 const all = deskDoors.map((door) => door.href);
 
 /** The Desk: ledger tabs, and doors across to the other rooms. */
 export default async function DeskLayout({ children }: { children: ReactNode }) {
-  const actor = await currentActor();
+  const actor = await enter('desk.read');
   const others = rooms.filter((room) => room.href !== '/desk' && can(actor, room.deed));
   return (
     <div data-theme="auto" className="min-h-dvh">

@@ -1,8 +1,8 @@
 import type { ReactNode } from 'react';
+import { enter } from '@/app/view';
 import { Dock } from '@/components/shell/dock';
 import { storeDoors } from '@/components/shell/rooms';
 import { SkipLink } from '@/components/shell/skip-link';
-import { currentActor } from '@/services/people';
 
 /** Floor density, light whatever the system says: tablets stand under lamps. */
 export default async function StoreLayout({ children }: { children: ReactNode }) {
@@ -10,7 +10,7 @@ export default async function StoreLayout({ children }: { children: ReactNode })
     <div data-theme="light" className="flex min-h-dvh flex-col text-floor">
       <SkipLink />
       <div className="flex-1">{children}</div>
-      <Dock label="Store" doors={storeDoors} actor={await currentActor()} />
+      <Dock label="Store" doors={storeDoors} actor={await enter('stock.read')} />
     </div>
   );
 }

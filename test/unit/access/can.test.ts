@@ -24,6 +24,7 @@ const all: Who[] = [...people, 'stripe', 'worker', 'command'];
 /** Who may, without owning anything: the whole matrix, a line a deed. A deed without a line fails. */
 const matrix: Record<string, Who[]> = {
   'account.create': all,
+  'account.sign-in': all,
   'account.read-own': ['customer', ...staff],
   'account.change-own': ['customer', ...staff],
   'person.list': ['owner'],
@@ -32,6 +33,7 @@ const matrix: Record<string, Who[]> = {
   'invitation.accept': all,
   'first-owner.create': ['command'],
   'record.read': ['owner'],
+  'record.verify': ['owner', 'command'],
   'part.read': staff,
   'part.edit': ['designer', 'owner'],
   'kit.read-all': staff,
@@ -45,6 +47,7 @@ const matrix: Record<string, Who[]> = {
   'version.withdraw': ['owner'],
   'evaluation.run': all,
   'price.set': ['owner'],
+  'delivery.set': ['owner'],
   'catalogue.read': all,
   'basket.change': all,
   'order.place': all,
@@ -61,13 +64,17 @@ const matrix: Record<string, Who[]> = {
   'stock.receive': ['packer', 'owner'],
   'stock.block': ['checker'],
   'box.list': ['packer', 'owner'],
+  'box.prepare': ['packer', 'owner', 'worker', 'command'],
   'box.pack': ['packer'],
   'box.trace': staff,
   'order.ship': ['packer'],
   'paper.guide': staff,
   'paper.slip': ['packer', 'owner'],
+  'paper.label': ['packer', 'owner'],
+  'paper.invoice': ['owner'],
   'desk.read': ['owner'],
   'mail.send': ['worker'],
+  'outbox.work': ['worker'],
   'demo.sign-in': all,
 };
 
