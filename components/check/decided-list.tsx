@@ -28,7 +28,7 @@ export function DecidedList({
       {entries.map((entry) => (
         <li
           key={entry.versionId}
-          className="relative grid items-center gap-x-6 gap-y-1 border-b border-rule py-3.5 hover:bg-card md:grid-cols-[19rem_minmax(10rem,18rem)_minmax(0,1fr)]"
+          className="relative grid items-center gap-x-6 gap-y-1 border-b border-rule py-3.5 hover:bg-card md:grid-cols-[24rem_minmax(8rem,18rem)_minmax(0,1fr)]"
         >
           <Link
             href={`/check/${entry.versionId}`}

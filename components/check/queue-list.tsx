@@ -22,7 +22,7 @@ export function QueueList({ queue, current }: QueueListProps) {
   const all = [...queue.waiting, ...queue.held];
   return (
     <>
-      <div className="border-b border-rule p-4 lg:hidden">
+      <div className="border-b border-rule p-4 md:hidden">
         <Select
           label="Version on the table"
           value={all.some(({ versionId }) => versionId === current) ? (current ?? '') : ''}
@@ -34,7 +34,7 @@ export function QueueList({ queue, current }: QueueListProps) {
           ]}
         />
       </div>
-      <nav aria-label="Queue" className="hidden border-r border-rule bg-paper lg:block">
+      <nav aria-label="Queue" className="hidden border-r border-rule bg-paper md:block">
         <h2 className="px-4.5 pt-4 pb-3 text-caption font-semibold text-ink2">In check, oldest first</h2>
         {queue.waiting.length === 0 && <p className="border-t border-rule px-4.5 py-3 text-caption">Nothing waits.</p>}
         <ul>

@@ -76,6 +76,7 @@ export function designOf(content: Pick<VersionContent, 'kit' | 'circuit' | 'line
     coil: {
       kind: 'solenoid',
       turns: circuit.winding.turns,
+      // The winding's tolerance covers the former's (coils-and-capacitors, J), so that it does not count twice.
       formerDiameter: former.outerDiameter.nominal,
       formerLength: former.length,
       former: former.wall,

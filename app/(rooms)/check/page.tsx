@@ -13,7 +13,7 @@ export default async function CheckPage() {
   const first = queue.waiting.find((entry) => !entry.own) ?? queue.waiting[0];
   if (first) redirect(`/check/${first.versionId}`);
   return (
-    <main id="main" className="lg:grid lg:min-h-[calc(100dvh-60px)] lg:grid-cols-[284px_minmax(0,1fr)]">
+    <main id="main" className="md:grid md:min-h-[calc(100dvh-60px)] md:grid-cols-[284px_minmax(0,1fr)]">
       <QueueList queue={queue} current={null} />
       <EmptyQueue />
     </main>

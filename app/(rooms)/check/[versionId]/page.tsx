@@ -16,7 +16,7 @@ export default async function SheetPage({ params }: { params: Promise<{ versionI
     mayWithdraw: can(actor, 'version.withdraw'),
   }));
   return (
-    <main id="main" className="lg:grid lg:min-h-[calc(100dvh-60px)] lg:grid-cols-[284px_minmax(0,1fr)]">
+    <main id="main" className="md:grid md:min-h-[calc(100dvh-60px)] md:grid-cols-[284px_minmax(0,1fr)]">
       <QueueList queue={queue} current={sheet.versionId} />
       <CheckSheet
         key={`${sheet.versionId} ${sheet.state}`}
