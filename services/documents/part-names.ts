@@ -1,5 +1,5 @@
 import type { FrozenLine } from '../kits/schemas';
-import { amountText } from '../packing/rules';
+import { amountText, familyOfPart } from '../packing/rules';
 import type { PartValues } from '../parts/schemas';
 import { showCapacitance, showResistance } from '../quantity';
 import { capacitorCode, resistorBands } from './markings';
@@ -10,48 +10,6 @@ import type { GuidePart } from './schemas';
  * embedded; a plain no-break blank says the same.
  */
 export const printable = (text: string) => text.replace(/[\u2009\u202f]/g, '\u00a0').replace(/\u00b5/g, '\u03bc');
-
-/** The drawing of a part's family by its kind; a pair of capsules on a band is drawn as a headset. */
-export function familyOf(values: PartValues): string {
-  switch (values.kind) {
-    case 'coil-former':
-      return 'coil-tube';
-    case 'wire':
-      return 'reel';
-    case 'variable-capacitor':
-      return 'vanes';
-    case 'foil-capacitor':
-      return 'foil-plates';
-    case 'fixed-capacitor':
-      return 'fixed-capacitor';
-    case 'earphone':
-      return values.earphoneKind === 'ceramic' ? 'earpiece' : 'headset';
-    case 'aerial-wire':
-      return 'aerial';
-    case 'earth-lead':
-      return 'earth';
-    case 'hardware':
-      return 'terminal';
-    case 'print':
-      return 'guide';
-    case 'packaging':
-      return 'box';
-    case 'resistor':
-    case 'detector':
-    case 'transformer':
-    case 'tool':
-      return values.kind;
-  }
-}
-
-/** Hardware is one kind of many shapes; its name tells a board and a knob from a terminal. */
-export function familyOfPart(part: { name: string; values: PartValues }): string {
-  if (part.values.kind !== 'hardware') return familyOf(part.values);
-  if (/\bboard\b|\bbase\b/i.test(part.name)) return 'board';
-  if (/\bknob\b/i.test(part.name)) return 'knob';
-  if (/\bterminal|\bpost|\bclip/i.test(part.name)) return 'terminal';
-  return 'packet';
-}
 
 /** How to recognise a part that carries a code, so that a 10 pF marked 100 is not taken for 100 pF. */
 export function markingOf(values: PartValues): string {

@@ -1,9 +1,9 @@
 import type { BoxPapers } from '../packing';
-import { countPieces } from '../packing/rules';
+import { countPieces, familyOfPart } from '../packing/rules';
 import type { Contour, Verdict } from '../receiver';
 import { type Instant, showClock, showDate } from '../time';
 import { reachOf } from './guide-view';
-import { familyOfPart, printable } from './part-names';
+import { printable } from './part-names';
 import type { LabelView, SlipView } from './schemas';
 import { contactOf, sellerLine } from './seller-line';
 

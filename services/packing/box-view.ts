@@ -1,9 +1,11 @@
 import type { Knex } from 'knex';
 import { type Actor, personIdOf } from '../access';
 import { frozenContent } from '../kits';
+import type { FrozenLine, VersionContent } from '../kits/schemas';
 import type { Instant } from '../time';
 import { type BoxLineRow, type BoxRow, type InBox, type LotOfPart, getBox, inBox, linesOf, lotsOf } from './rows';
-import { amountText, claimLapsed, closeBlockers, countPieces, isIn, suggest, barOf, weighing } from './rules';
+import { weighing } from './mass';
+import { familyOfPart, amountText, claimLapsed, closeBlockers, countPieces, isIn, suggest, barOf } from './rules';
 import type { BoxCard, BoxView, TrayPlace } from './schemas';
 import { guideCode, shortHash } from './serial';
 
@@ -14,8 +16,7 @@ export async function boxView(sql: Knex, actor: Actor, boxId: string, now: Insta
   const lines = await linesOf(sql, [box.id]);
   const lots = await lotsOf(sql, [...new Set(lines.map((line) => line.partId))]);
   const picked = await inBox(sql, box.id);
-  const notes = new Map(content.lines.map((line) => [line.reference, line.note]));
-  const places = trayPlaces(lines, lots, notes);
+  const places = trayPlaces(lines, lots, content);
   const mass = weighing(box.expectedMilligrams, box.weighedMilligrams, content);
 
   return {
@@ -85,8 +86,9 @@ export function claimOf(box: BoxRow, actor: Actor, now: Instant): BoxCard['claim
 export function trayPlaces(
   lines: readonly BoxLineRow[],
   lots: readonly LotOfPart[],
-  notes: ReadonlyMap<string, string>,
+  content: Pick<VersionContent, 'lines'>,
 ): TrayPlace[] {
+  const frozen = new Map(content.lines.map((line) => [line.reference, line]));
   let nextGiven = false;
   return lines.map((line) => {
     const mine = lots.filter((lot) => lot.partId === line.partId);
@@ -97,6 +99,7 @@ export function trayPlaces(
       lineId: line.id,
       reference: line.reference,
       kind: line.kind,
+      family: familyAt(frozen.get(line.reference)),
       partCode: line.partCode,
       name: line.name,
       unit: line.unit,
@@ -112,10 +115,12 @@ export function trayPlaces(
         binPosition: suggestion.binPosition,
         onHand: suggestion.onHand,
       },
-      note: notes.get(line.reference) ?? '',
+      note: frozen.get(line.reference)?.note ?? '',
     };
   });
 }
+
+const familyAt = (line: FrozenLine | undefined) => (line?.part ? familyOfPart(line.part) : 'packet');
 
 /** A bin told empty without another lot to go to, or a part with none at all, waits for the store. */
 function stateOf(line: BoxLineRow, hasLot: boolean, nextGiven: boolean): TrayPlace['state'] {

@@ -5,7 +5,7 @@ import { record, write } from '../record';
 import { blockersOf, boxView } from './box-view';
 import { boxInHands } from './in-hands';
 import { hasOpenBoxes, inBox, linesOf, moveOrder, setClosed } from './rows';
-import { weighing } from './rules';
+import { weighing } from './mass';
 import { type BoxView, CloseBox } from './schemas';
 
 /**

@@ -6,7 +6,8 @@ import { type VersionId, newId } from '../ids';
 import { Problem } from '../problem';
 import { type Tx, reading, record, write } from '../record';
 import { lotsOf, nextCount } from './rows';
-import { expectedMass, suggest } from './rules';
+import { expectedMass } from './mass';
+import { suggest } from './rules';
 import { serialOf } from './serial';
 
 /**

@@ -1,13 +1,14 @@
 import { type Actor, can, must } from '../access';
 import { reading, now } from '../record';
+import { PartValues } from '../parts/schemas';
 import { prepareBoxes } from './make-boxes';
 import { type BoxLineRow, type BoxRow, type LotOfPart, linesOf, lotsOf } from './rows';
-import { amountText, isIn } from './rules';
+import { amountText, familyOfPart, isIn } from './rules';
 import type { PickList, PickStop } from './schemas';
 import { cardsOf, openBoxes } from './views';
 
 /** Boxes fetched in one walk when nobody says otherwise; ten trays fit a trolley. */
-export const boxesInAWalk = 10;
+const boxesInAWalk = 10;
 
 /** One walk along the bins for the oldest boxes: at each bin what to take, of which lot, and for which boxes. */
 export async function readPickList(actor: Actor, input: { boxes?: number } = {}): Promise<PickList> {
@@ -15,7 +16,8 @@ export async function readPickList(actor: Actor, input: { boxes?: number } = {})
   if (can(actor, 'box.prepare')) await prepareBoxes(actor);
   const sql = reading();
   const all = (await openBoxes(sql)).filter((box) => box.versionState === 'released');
-  const walk = all.slice(0, Math.max(1, Math.min(50, input.boxes ?? boxesInAWalk)));
+  const asked = Math.max(1, Math.min(50, input.boxes ?? boxesInAWalk));
+  const walk = all.slice(0, asked);
   const lines = (
     await linesOf(
       sql,
@@ -25,6 +27,7 @@ export async function readPickList(actor: Actor, input: { boxes?: number } = {})
   const lots = await lotsOf(sql, [...new Set(lines.map((line) => line.partId))]);
   const { takes, short } = shareLots(walk, lines, lots);
   return {
+    asked,
     boxes: await cardsOf(sql, actor, walk, now()),
     stops: stopsOf(takes),
     short,
@@ -40,7 +43,7 @@ interface Take {
 }
 
 /** Gives each box in turn the oldest lots that are left; a cut length comes from one reel only. */
-export function shareLots(
+function shareLots(
   walk: readonly BoxRow[],
   lines: readonly BoxLineRow[],
   lots: readonly LotOfPart[],
@@ -94,7 +97,7 @@ function stopsOf(takes: readonly Take[]): PickStop[] {
       return {
         partCode: line.partCode,
         name: line.name,
-        kind: line.kind,
+        family: familyOfPart({ name: line.name, values: PartValues.parse(JSON.parse(line.values)) }),
         lotCode,
         // Cut lengths are cut one by one: "3 of 14 m" tells more than 42 m.
         amount: line.unit === 'each' ? String(total) : cuts(these),

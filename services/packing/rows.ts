@@ -116,6 +116,8 @@ export interface BoxLineRow {
   partCode: string;
   name: string;
   kind: string;
+  /** As stored: JSON of the kind's values. */
+  values: string;
   unit: PartUnit;
   needed: number;
   packed: number;
@@ -137,6 +139,7 @@ export function linesOf(sql: Knex, boxIds: readonly string[]): Promise<BoxLineRo
       partCode: 'parts.code',
       name: 'parts.name',
       kind: 'parts.kind',
+      values: 'parts.values',
       unit: 'parts.unit',
       needed: 'box_lines.needed',
       packed: 'box_lines.packed',

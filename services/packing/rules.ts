@@ -1,9 +1,11 @@
-import { lineMass } from '../kits/rules';
-import type { VersionContent, VersionState } from '../kits/schemas';
+import type { VersionState } from '../kits/schemas';
 import type { Address } from '../orders/schemas';
 import type { PartUnit } from '../parts/schemas';
 import { type Instant, days, minutes, showClock } from '../time';
 import type { BoxState, LotPlace, MassView } from './schemas';
+
+export { familyOfPart } from './part-family';
+export { isSerial } from './serial';
 
 /** A claim holds this long after the packer's last scan; then somebody else may take the box over. */
 export const claimHolds = minutes(15);
@@ -92,55 +94,7 @@ export function suggest<Lot extends LotPlace>(
   return lots.find((lot) => lot.onHand >= Math.max(1, least) && lot.binId !== line.toldEmptyBinId) ?? null;
 }
 
-/** A guide of six A4 sheets, 80 g/m2 at 0.0624 m2 each, for versions whose lines name no print. */
-const guideMilligrams = 30_000;
-
-/** What the closed box should weigh: every line of the version, prints included. */
-export function expectedMass(content: Pick<VersionContent, 'lines'>): number {
-  const hasPrint = content.lines.some((line) => line.part?.values.kind === 'print');
-  const lines = content.lines.reduce((sum, line) => sum + lineMass(line), 0);
-  return lines + (hasPrint ? 0 : guideMilligrams);
-}
-
-/** Two per cent or two grams, whichever is more: a missing coil or earphone shows, a missing washer does not (kit-trade e.4). */
-export function massLimits(expected: number): { low: number; high: number } {
-  const spare = Math.max(Math.round(expected * 0.02), 2000);
-  return { low: expected - spare, high: expected + spare };
-}
-
 export const grams = (milligrams: number) => (milligrams / 1000).toFixed(1);
-
-/** What the scale's reading says, and whether the lid may close on it. */
-export function weighing(expected: number, weighed: number | null, content: Pick<VersionContent, 'lines'>): MassView {
-  const { low, high } = massLimits(expected);
-  const range = `${grams(low)} to ${grams(high)} g`;
-  const view = { expected, low, high, weighed };
-  if (weighed === null) return { ...view, fits: false, sentence: `Not weighed yet. It should read ${range}.` };
-  if (weighed >= low && weighed <= high) {
-    return { ...view, fits: true, sentence: `${grams(weighed)} g is right: it should read ${range}.` };
-  }
-  const off = Math.abs(weighed - expected);
-  const like = partOfMass(content, off);
-  const hint = like === '' ? '' : ` That is about one ${like}.`;
-  const what = weighed < low ? `${grams(off)} g is missing.` : `${grams(off)} g is too much.`;
-  return {
-    ...view,
-    fits: false,
-    sentence: `${what}${hint} Look into the box, then weigh it again; it should read ${range}.`,
-  };
-}
-
-/** The part whose one piece comes nearest to a difference in mass, when it comes within a tenth. */
-function partOfMass({ lines }: Pick<VersionContent, 'lines'>, milligrams: number): string {
-  let best = { name: '', off: milligrams / 10 };
-  for (const line of lines) {
-    if (!line.part) continue;
-    const one = line.part.unit === 'each' ? line.part.massMilligrams : lineMass(line);
-    const off = Math.abs(one - milligrams);
-    if (off < best.off) best = { name: lowerFirst(line.part.name), off };
-  }
-  return best.name;
-}
 
 /** "Germanium detector" inside a sentence; a name that begins with an abbreviation keeps its capitals. */
 export const lowerFirst = (name: string) =>

@@ -64,6 +64,7 @@ export const BoxCard = z.strictObject({
   pieces: z.strictObject({ packed: z.int(), needed: z.int() }),
   paidAt: z.int(),
   dueAt: z.int(),
+  late: z.boolean(),
   /** Who has it just now; null where anybody may take it. */
   claim: z.strictObject({ by: z.string(), mine: z.boolean(), since: z.int(), lapsed: z.boolean() }).nullable(),
   /** Why nobody may pack it, "version 4 F was withdrawn" say; empty as a rule. */
@@ -86,8 +87,9 @@ export type LotPlace = z.infer<typeof LotPlace>;
 export const TrayPlace = z.strictObject({
   lineId: LineId,
   reference: z.string(),
-  /** The kind of the part as the kind table names it: it decides the drawing. */
   kind: z.string(),
+  /** Which silhouette stands for it. */
+  family: z.string(),
   partCode: z.string(),
   name: z.string(),
   unit: z.enum(['each', 'metre', 'gram']),
@@ -158,7 +160,7 @@ export const PickStop = z.strictObject({
     z.strictObject({
       partCode: z.string(),
       name: z.string(),
-      kind: z.string(),
+      family: z.string(),
       lotCode: z.string(),
       amount: z.string(),
       /** "2 for Y-4127 box 1" */
@@ -171,6 +173,8 @@ export const PickStop = z.strictObject({
 export type PickStop = z.infer<typeof PickStop>;
 
 export const PickList = z.strictObject({
+  /** Boxes in a walk, as it was asked for. */
+  asked: z.int(),
   boxes: z.array(BoxCard),
   stops: z.array(PickStop),
   /** Parts for which no accepted lot lies in any bin. */

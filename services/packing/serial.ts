@@ -1,6 +1,6 @@
 /**
  * Box serials: kit code, version letter, six digits, and a check character by ISO 7064 MOD 37,36, which finds every
- * single wrong character and every swap of neighbours and is never a star (kit-trade e.3).
+ * single wrong character, all but one in 630 of the swaps of neighbours, and is never a star (kit-trade e.3).
  */
 const alphabet = '0123456789ABCDEFGHIJKLMNOPQRSTUVWXYZ';
 

@@ -60,6 +60,7 @@ export async function cardsOf(sql: Knex, actor: Actor, rows: readonly BoxRow[], 
       pieces: countPieces(byBox.get(row.id) ?? []),
       paidAt,
       dueAt: dispatchDue(paidAt),
+      late: row.state !== 'closed' && at > dispatchDue(paidAt),
       claim: claimOf(row, actor, at),
       barred: barOf(row),
     };

@@ -4,7 +4,8 @@ import { record, write } from '../record';
 import { boxView } from './box-view';
 import { boxInHands } from './in-hands';
 import { keepClaim, linesOf } from './rows';
-import { countPieces, massLimits, pieces } from './rules';
+import { massLimits } from './mass';
+import { countPieces, pieces } from './rules';
 import { type BoxView, Weigh } from './schemas';
 
 /** Takes the scale's reading of the full box. Outside the limits it stays on record and asks for another weighing. */

@@ -1,17 +1,8 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import type { VersionContent } from '@/services/kits/schemas';
-import {
-  amountText,
-  barOf,
-  closeBlockers,
-  countPieces,
-  expectedMass,
-  massLimits,
-  mayMove,
-  suggest,
-  weighing,
-} from '@/services/packing/rules';
+import { amountText, barOf, closeBlockers, countPieces, mayMove, suggest } from '@/services/packing/rules';
+import { expectedMass, massLimits, weighing } from '@/services/packing/mass';
 import type { LotPlace } from '@/services/packing/schemas';
 import { BinId, LotId, newId } from '@/services/ids';
 import cases from '../../reference/kit-trade.checks.json';

@@ -1,0 +1,87 @@
+import { Sign } from '@/components/ui/sign';
+import type { ActionResult } from '@/components/forms/action-result';
+import type { BoxView } from '@/services/packing/schemas';
+import { showClock } from '@/services/time';
+import { CloseButton } from './close-button';
+import { CodeField, type CodeFieldProps } from './code-field';
+import type { BoxDeeds } from './deeds';
+import { PrintRow } from './print-row';
+import { ScanAnswer } from './scan-answer';
+import type { Answer } from './use-box';
+import { WeighForm } from './weigh-form';
+
+export interface LidPanelProps {
+  box: BoxView;
+  answer: Answer | null;
+  dismiss: () => void;
+  deeds: BoxDeeds;
+  change: (deed: () => Promise<ActionResult<BoxView>>) => Promise<boolean>;
+  isBusy: boolean;
+  field: CodeFieldProps;
+}
+
+/** When everything is in: papers, the guide's code, the scale, and then the lid. */
+export function LidPanel({ box, answer, dismiss, deeds, change, isBusy, field }: LidPanelProps) {
+  const name = `${box.plate.kitNumber} ${box.plate.letter}`;
+  const isReleased = box.versionState === 'released';
+  return (
+    <>
+      <h2 className="font-display text-[30px] leading-9">Everything is in</h2>
+      <p className="text-on-enamel2">Print, scan the guide, weigh, and close the lid.</p>
+      <div className="rounded-panel bg-card px-4 py-3 text-ink">
+        <p className="flex items-center gap-2 font-bold">
+          <Sign kind={isReleased ? 'clears' : 'stops'} size={24} />
+          {isReleased ? `Tray, guide and version are ${name}, released` : `Version ${name} is not released`}
+        </p>
+        <p className="text-body">
+          content <span className="font-figures">{box.hash}</span>
+        </p>
+      </div>
+      <ol className="grid gap-3">
+        <PrintRow
+          box={box}
+          paper="guide"
+          printedAt={box.guide.printedAt}
+          isLocked={!isReleased}
+          isBusy={isBusy}
+          onPrinted={() => change(() => deeds.markPrinted({ boxId: box.id, paper: 'guide' }))}
+        />
+        <PrintRow
+          box={box}
+          paper="slip"
+          printedAt={box.slipPrintedAt}
+          isLocked={!isReleased}
+          isBusy={isBusy}
+          onPrinted={() => change(() => deeds.markPrinted({ boxId: box.id, paper: 'slip' }))}
+        />
+        <li className="flex items-center gap-3 rounded-panel bg-card px-4 py-3 text-ink">
+          <Sign kind={box.guide.scannedAt === null ? 'waiting' : 'clears'} size={28} />
+          <span>
+            <b className="block">{box.guide.scannedAt === null ? 'Scan the code on the guide' : 'Guide scanned'}</b>
+            {box.guide.scannedAt === null ? (
+              <>
+                It reads <span className="font-figures">{box.guide.code}</span>
+              </>
+            ) : (
+              `at ${showClock(box.guide.scannedAt)}, right for this box`
+            )}
+          </span>
+        </li>
+        <WeighForm
+          box={box}
+          isBusy={isBusy}
+          onWeigh={(milligrams) => change(() => deeds.weigh({ boxId: box.id, milligrams }))}
+        />
+      </ol>
+      <ScanAnswer answer={answer} dismiss={dismiss} />
+      <div className="mt-auto grid gap-3">
+        <CodeField {...field} />
+        <CloseButton
+          reasons={box.reasons}
+          isBusy={isBusy}
+          onClose={() => void change(() => deeds.closeBox({ boxId: box.id }))}
+        />
+      </div>
+    </>
+  );
+}
