@@ -1,7 +1,7 @@
 import { gang } from './capacitors/gang';
 import { labelsThatFit, type DialMark } from './capacitors/dial';
 import type { Design } from './design';
-import { capacitanceNeeded } from './network/circuit';
+import { capacitanceNeeded } from './network/solve';
 import { parseDesign } from './parse';
 import { centre } from './schema/value';
 import { prepared } from './survey';

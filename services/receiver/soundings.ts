@@ -1,6 +1,6 @@
 import { inputResistance, rectifyBehind, type Diode } from './detector/diode';
 import type { Sounding } from './figures';
-import { sourceResistance } from './network/circuit';
+import { sourceResistance } from './network/solve';
 import type { Plan } from './network/plan';
 import { adjacentAt, bandwidthAt, qAt, responseAt, tuneTo } from './network/point';
 import type { Hertz, Ohm, Volt } from './units';

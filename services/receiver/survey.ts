@@ -10,7 +10,7 @@ import { detectorFacts } from './detector/facts';
 import { earphoneCircuit } from './earphone/facts';
 import { audioLoad, directLoad, OPEN } from './earphone/loads';
 import { middleOf, type Figures, type Sounding } from './figures';
-import { coilResistanceAt } from './network/circuit';
+import { coilResistanceAt } from './network/solve';
 import { sectionRows } from './network/fill-wound';
 import { planOf, type Plan } from './network/plan';
 import type { Rules } from './rules';

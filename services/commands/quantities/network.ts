@@ -1,6 +1,7 @@
 import { marginsOf } from '../../receiver/coverage/reach';
 import { resonance } from '../../receiver/coils/self-capacitance';
-import { capacitanceNeeded, emptyCircuit, voltagePerEmf, type Circuit } from '../../receiver/network/circuit';
+import { emptyCircuit, type Circuit } from '../../receiver/network/circuit';
+import { capacitanceNeeded, voltagePerEmf } from '../../receiver/network/solve';
 import { bandwidthAt } from '../../receiver/network/point';
 import { decibel } from '../../receiver/numeric/exp-log';
 import { brent } from '../../receiver/numeric/roots';

@@ -1,4 +1,4 @@
-import { capacitanceNeeded } from '../network/circuit';
+import { capacitanceNeeded } from '../network/solve';
 import type { Plan } from '../network/plan';
 import { possible } from '../network/values';
 import { clopperPearson } from '../numeric/quantiles';

@@ -1,4 +1,4 @@
-import { capacitanceNeeded } from '../network/circuit';
+import { capacitanceNeeded } from '../network/solve';
 import type { Plan } from '../network/plan';
 import { largestTurns } from '../network/point';
 import type { Hertz } from '../units';

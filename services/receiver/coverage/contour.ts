@@ -1,5 +1,5 @@
 import { within } from '../invalid-input';
-import { capacitanceNeeded } from '../network/circuit';
+import { capacitanceNeeded } from '../network/solve';
 import { possible } from '../network/values';
 import { exp, log } from '../numeric/exp-log';
 import { parseDesign } from '../parse';

@@ -1,5 +1,5 @@
 import { at } from '../numeric/cells';
-import { capacitanceNeeded } from '../network/circuit';
+import { capacitanceNeeded } from '../network/solve';
 import type { Plan } from '../network/plan';
 import { cornerEnds } from '../network/values';
 import type { Hertz } from '../units';

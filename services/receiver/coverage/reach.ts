@@ -1,5 +1,5 @@
 import { brent, minimum } from '../numeric/roots';
-import { capacitanceNeeded } from '../network/circuit';
+import { capacitanceNeeded } from '../network/solve';
 import type { Plan } from '../network/plan';
 import { exp, log } from '../numeric/exp-log';
 import { LIGHT_SPEED, TWO_PI, type Farad, type Hertz } from '../units';

@@ -1,6 +1,6 @@
 import { decibel } from '../numeric/exp-log';
 import { brent } from '../numeric/roots';
-import { capacitanceNeeded, voltagePerField } from '../network/circuit';
+import { capacitanceNeeded, voltagePerField } from '../network/solve';
 import { planOf } from '../network/plan';
 import { responseAt, tuneTo } from '../network/point';
 import { centre } from '../schema/value';

@@ -1,6 +1,6 @@
 import { fieldAt } from '../audio';
 import type { Figures } from '../figures';
-import { aerialHeight } from '../network/circuit';
+import { aerialHeight } from '../network/solve';
 import { shownQuantity, type Found } from './finding';
 
 interface Usual {

@@ -10,7 +10,7 @@ import { LIMITS } from '../schema/limits';
 import type { Value } from '../schema/value';
 import { sameAsBefore, type CoilFiller } from './filler';
 import type { Values } from './values';
-import { windingInto, wireReader, type WireSize } from './fill-wound';
+import { windingInto, wireReader, type WireSize } from './read-wire';
 
 interface WoundPrimary {
   turns: number;

@@ -8,7 +8,8 @@ import { aerialFiller } from './fill-aerial';
 import { couplingFiller } from './fill-coupling';
 import { measuredFiller } from './fill-measured';
 import { tuningFiller } from './fill-tuning';
-import { woundFiller, type Wound } from './fill-wound';
+import { woundFiller } from './fill-wound';
+import type { Wound } from './wound-geometry';
 import { Values } from './values';
 
 /** How the set is tuned: what moves, and whether a capacitor helps a slider. */

@@ -1,7 +1,7 @@
 import { decibel } from '../numeric/exp-log';
 import { bisect, brent, minimum } from '../numeric/roots';
 import { TWO_PI, type Farad, type Hertz } from '../units';
-import { capacitanceNeeded, topAdmittance, voltagePerField } from './circuit';
+import { capacitanceNeeded, topAdmittance, voltagePerField } from './solve';
 import type { Plan } from './plan';
 
 /** Where the moving part of the set stands, and the capacitance across the top. */

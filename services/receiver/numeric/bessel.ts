@@ -31,10 +31,6 @@ function scaledBessel(order: 0 | 1, x: number): number {
   return sum / Math.sqrt(TWO_PI * x);
 }
 
-export function besselI0Scaled(x: number): number {
-  return scaledBessel(0, x);
-}
-
 export function besselI1Scaled(x: number): number {
   return scaledBessel(1, x);
 }
