@@ -1,4 +1,5 @@
 import type { Metadata, Viewport } from 'next';
+import { headers } from 'next/headers';
 import type { ReactNode } from 'react';
 import { faces } from '@/components/fonts';
 import './globals.css';
@@ -13,9 +14,14 @@ export const viewport: Viewport = { width: 'device-width', initialScale: 1 };
 /** Rendered for each request: the content security policy gives every page its own nonce. */
 export const dynamic = 'force-dynamic';
 
-export default function RootLayout({ children }: { children: ReactNode }) {
+export default async function RootLayout({ children }: { children: ReactNode }) {
+  const nonce = (await headers()).get('x-nonce') ?? undefined;
   return (
     <html lang="en" className={faces}>
+      <head>
+        {/* Where react-aria looks for the nonce of the style element it adds. Browsers hide the attribute once read. */}
+        <meta property="csp-nonce" nonce={nonce} suppressHydrationWarning />
+      </head>
       <body>{children}</body>
     </html>
   );

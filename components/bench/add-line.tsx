@@ -76,7 +76,11 @@ export function AddLine({
     );
   }
   return (
-    <div className="grid gap-3 rounded-label border-1.5 border-dashed border-edge p-3">
+    <div
+      // Into sight before anything is typed: a list closes when the page scrolls under it.
+      ref={(box) => box?.scrollIntoView({ block: 'nearest' })}
+      className="grid scroll-mb-60 gap-3 rounded-label border-1.5 border-dashed border-edge p-3"
+    >
       {places.length > 1 && (
         <div role="group" aria-label="Place of the line" className="flex flex-wrap gap-2">
           {places.map((one) => (

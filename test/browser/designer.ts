@@ -24,7 +24,7 @@ export async function addLine(page: Page, group: string, part: string, place?: s
   const section = page.getByRole('region', { name: group, exact: true });
   await section.getByRole('button', { name: 'Add a line' }).click();
   if (place !== undefined) await section.getByRole('button', { name: place, exact: true }).click();
-  const search = section.getByRole('combobox');
+  const search = section.getByPlaceholder('Code or name');
   await search.fill(part);
   const option = page.getByRole('option', { name: new RegExp(`^${part} `) }).first();
   await option.click();
