@@ -57,25 +57,48 @@ export function cornersOf(plan: Plan, points: Float64Array, nominal: Ends): Ends
  * below Cmax at the worst low end, this corner's low end lies no higher; the high end likewise where the branch cannot
  * fold below it.
  */
-function combineAll(plan: Plan, points: Float64Array, pulls: readonly Pull[], x: Float64Array, worst: Ends): void {
-  const { circuit, mode } = plan;
+function combineAll(plan: Plan, points: Float64Array, found: readonly Pull[], x: Float64Array, worst: Ends): void {
+  const { circuit, mode, values } = plan;
+  // The coil's geometry turns over last: its inductances are the dearest to work out.
+  const isCoil = ({ index }: Pull): boolean => values.entries[index]?.path.startsWith('coil.') ?? false;
+  const pulls = [...found.filter((pull) => !isCoil(pull)), ...found.filter(isCoil)];
+  const foldFree = mode === 'capacitor' && cannotFold(plan, points, pulls, x, worst.hi);
   const combinations = 1 << pulls.length;
   for (let bits = 0; bits < combinations; bits += 1) {
-    pulls.forEach((pull, place) => {
-      x[pull.index] = pull.ends[(bits >>> place) & 1 ? 1 : 0];
-    });
+    for (let place = 0; place < pulls.length; place += 1) {
+      const pull = pulls[place];
+      if (pull !== undefined) x[pull.index] = pull.ends[(bits >>> place) & 1 ? 1 : 0];
+    }
     plan.fill(x);
-    if (capacitanceNeeded(circuit, worst.lo) > circuit.cMax)
+    if (capacitanceNeeded(circuit, worst.lo) > circuit.cMax) {
       worst.lo = Math.max(worst.lo, fallsTo(plan, points, circuit.cMax));
+    }
     if (mode !== 'capacitor') {
       plan.moveTo(x, circuit.positionMin);
-      if (capacitanceNeeded(circuit, worst.hi) <= circuit.cMin)
+      if (capacitanceNeeded(circuit, worst.hi) <= circuit.cMin) {
         worst.hi = Math.min(worst.hi, fallsTo(plan, points, circuit.cMin));
-    } else if (capacitanceNeeded(circuit, worst.hi) <= circuit.cMin || !fallsThroughout(plan, points, worst.hi)) {
+      }
+    } else if (
+      capacitanceNeeded(circuit, worst.hi) <= circuit.cMin ||
+      !(foldFree || fallsThroughout(plan, points, worst.hi))
+    ) {
       const lo = fallsTo(plan, points, circuit.cMax);
       worst.hi = Math.min(worst.hi, branchEnd(plan, points, lo, circuit.cMin));
     }
   }
+}
+
+/** How far above the worst high end the corner of largest parts must fall for no other corner to fold below it. */
+const CLEARANCE = 1.1;
+
+/**
+ * Whether no corner folds below f. A fold is a resonance of the aerial circuit, and every resonance moves down when any
+ * inductance or capacitance grows: the corner with every part at its larger end has the lowest one.
+ */
+function cannotFold(plan: Plan, points: Float64Array, pulls: readonly Pull[], x: Float64Array, f: Hertz): boolean {
+  for (const pull of pulls) x[pull.index] = pull.ends[1];
+  plan.fill(x);
+  return falls(plan, points, CLEARANCE * f);
 }
 
 /**
@@ -85,18 +108,20 @@ function combineAll(plan: Plan, points: Float64Array, pulls: readonly Pull[], x:
  */
 function fallsThroughout(plan: Plan, points: Float64Array, f: Hertz): boolean {
   const { circuit } = plan;
-  if (circuit.sections === 1 && !circuit.primary) {
-    capacitanceNeeded(circuit, f);
-    const size = circuit.aerialYr * circuit.aerialYr + circuit.aerialYi * circuit.aerialYi;
-    const r = circuit.aerialYr / size;
-    const xReactance = -circuit.aerialYi / size;
-    return xReactance <= -r;
-  }
+  if (circuit.sections > 1 || circuit.primary) return falls(plan, points, f);
+  capacitanceNeeded(circuit, f);
+  const size = circuit.aerialYr * circuit.aerialYr + circuit.aerialYi * circuit.aerialYi;
+  const resistance = circuit.aerialYr / size;
+  const reactance = -circuit.aerialYi / size;
+  return reactance <= -resistance;
+}
+
+function falls(plan: Plan, points: Float64Array, f: Hertz): boolean {
   let before = Infinity;
   for (let i = 0; i < points.length; i += 1) {
     const point = at(points, i);
     if (point > f) return true;
-    const now = capacitanceNeeded(circuit, point);
+    const now = capacitanceNeeded(plan.circuit, point);
     if (now > before) return false;
     before = now;
   }

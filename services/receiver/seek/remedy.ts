@@ -22,6 +22,8 @@ export interface RemedyContext {
 /** Most judgements of one finding, and of one that needs the boxes drawn each time. */
 const MOST_TRIES = 40;
 const MOST_DRAWN = 20;
+/** Most judgements that need every corner. */
+const MOST_CORNERS = 12;
 
 /** Stops that a change brings about. */
 function newStops(after: Outcome, before: ReadonlySet<string>): boolean {
@@ -124,7 +126,8 @@ export function remedyFor(
   context: RemedyContext,
   before: ReadonlySet<string>,
 ): Finding['remedy'] {
-  const budget = { left: depthOf(found.code) === 'boxes' ? MOST_DRAWN : MOST_TRIES };
+  const most = { nominal: MOST_TRIES, corners: MOST_CORNERS, boxes: MOST_DRAWN };
+  const budget = { left: most[depthOf(found.code)] };
   const search: Search = { found, rules: figures.rules, context, before };
   let fallback: Finding['remedy'] = null;
   for (const knob of knobsOf(found, figures, context.input)) {
