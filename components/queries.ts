@@ -18,6 +18,19 @@ export function usePartSearch(place: Place, q: string) {
   });
 }
 
+/** All parts of one place: a short list, since a place takes a kind or two. */
+export async function fetchPartsAt(place: Place): Promise<PartPage['parts']> {
+  const parts: PartPage['parts'] = [];
+  let after: string | null = '';
+  while (after !== null) {
+    const query = new URLSearchParams({ place, ...(after !== '' && { after }) });
+    const page: PartPage = await get<PartPage>(`/api/v1/parts?${query}`, AbortSignal.timeout(10_000));
+    parts.push(...page.parts);
+    after = page.next;
+  }
+  return parts;
+}
+
 async function get<T>(path: string, signal: AbortSignal): Promise<T> {
   const response = await fetch(path, { signal, headers: { Accept: 'application/json' } });
   if (!response.ok) throw new Error(`The yard answered ${response.status}.`);

@@ -8,6 +8,7 @@ import { QuantityStepper } from '@/components/ui/quantity-stepper';
 import { quantityWords } from '@/services/kits/rules';
 import type { LineView } from '@/services/kits/schemas';
 import { PartChoice } from './add-line';
+import { otherPart } from './find-parts';
 import { PartPicture } from './part-picture';
 import { partWords } from './part-words';
 import { QuantityField } from './quantity-field';
@@ -63,14 +64,7 @@ export function LineRow({ line, cause, onChange, onRemove }: LineRowProps) {
             label="Another part in its place"
             onChoose={(next) =>
               onChange({
-                partId: next.id,
-                part: {
-                  code: next.code,
-                  name: next.name,
-                  unit: next.unit,
-                  massMilligrams: next.massMilligrams,
-                  values: next.values,
-                },
+                ...otherPart(next),
                 ...(next.unit !== part.unit && { quantity: next.unit === 'each' ? 1 : 1000 }),
               })
             }

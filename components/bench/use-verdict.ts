@@ -32,7 +32,8 @@ export function useVerdict(content: VersionContent): VerdictState {
     const held = workers.current;
     const number = ++held.number;
     const take = (answer: VerdictAnswer, trying: number) => {
-      if (answer.number === held.number) setState({ answer, trying });
+      if (answer.number === held.number)
+        setState((before) => ({ answer: withRemedies(answer, before.answer), trying }));
     };
 
     held.quick ??= start();
@@ -65,6 +66,12 @@ export function useVerdict(content: VersionContent): VerdictState {
   }, []);
 
   return state;
+}
+
+/** A first answer has no remedies yet; the last ones stay in sight for the moment until the new ones are found. */
+function withRemedies(answer: VerdictAnswer, before: VerdictAnswer | null): VerdictAnswer {
+  if (answer.kind !== 'verdict' || answer.live.remedies !== null || before?.kind !== 'verdict') return answer;
+  return { ...answer, live: { ...answer.live, remedies: before.live.remedies } };
 }
 
 const start = () => new Worker(new URL('./verdict-worker.ts', import.meta.url), { type: 'module' });

@@ -1,6 +1,6 @@
-import { InvalidInput, contour, evaluate, responseCurves } from '@/services/receiver';
+import { InvalidInput, contour, evaluate, nearestFix, responseCurves } from '@/services/receiver';
 import type { DesignInput, Verdict } from '@/services/receiver';
-import { type Finding, allFindings, designOf, settingsFrom, stopsIn } from '@/services/kits/rules';
+import { type Finding, allFindings, designOf, stopsIn, versionChange, withChange } from '@/services/kits/rules';
 import type { VersionContent } from '@/services/kits/schemas';
 import type { ResponseSetting } from '@/components/charts/response-shape';
 import type { LiveVerdict, TriedRemedy, VerdictAnswer, VerdictRequest } from './verdict-messages';
@@ -13,6 +13,8 @@ const CURVE_POINTS = 141;
 const PEAK_STEPS = 12;
 const PEAK_STEP = 0.0015;
 const MOST_REMEDIES = 3;
+/** Boxes a way to mend is judged by: enough to show 99 %, few enough to be quick. */
+const FIX_BOXES = 1_000;
 
 /** Works out one request. The same functions run on the server when a version is sent to check. */
 export function answerTo({ number, content, boxes }: VerdictRequest): VerdictAnswer {
@@ -34,7 +36,7 @@ function liveVerdict(design: DesignInput, content: VersionContent, boxes: number
     findings,
     contour: boxes === 0 ? null : contour(design, { seed: SEED, boxes: CONTOUR_BOXES }),
     settings: settingsOf(design, verdict),
-    remedies: triedRemedies(content, findings),
+    remedies: boxes === 0 ? null : triedRemedies(design, content, findings),
   };
 }
 
@@ -53,46 +55,54 @@ function settingsOf(design: DesignInput, verdict: Verdict): ResponseSetting[] {
   }));
 }
 
-/** Each remedy that a press can apply, with what the version comes to under the same tolerances. */
-function triedRemedies(content: VersionContent, findings: readonly Finding[]): TriedRemedy[] {
-  const tried: TriedRemedy[] = [];
-  const stoodBefore = new Set(stopsIn(findings).map(({ code }) => code));
-  for (const { code, remedy } of findings) {
-    if (!remedy || tried.length === MOST_REMEDIES || tried.some(({ text }) => text === remedy.text)) continue;
-    const changed = settingsFrom(content, remedy.changes);
-    if (!changed) continue;
-    const next = withSettings(content, changed);
-    const { design } = designOf(next);
-    if (!design) continue;
-    const verdict = evaluateOrNull(design);
-    if (!verdict) continue;
-    const left = stopsIn(allFindings(verdict, next)).filter(
-      (stop) => stop.code === code || !stoodBefore.has(stop.code),
-    );
-    tried.push({
-      text: remedy.text,
-      code,
-      reach: changed.circuit === content.circuit ? null : verdict.reach,
-      stops: left.map(({ message }) => message),
-    });
-  }
-  return tried;
+interface Proposal {
+  code: string;
+  text: string;
+  changes: readonly { path: string; from: unknown; to: unknown }[];
 }
 
-export function withSettings(
-  content: VersionContent,
-  { circuit, quantities }: { circuit: VersionContent['circuit']; quantities: ReadonlyMap<string, number> },
-): VersionContent {
+/** Ways to mend what stops it that a press can apply, each judged under the same tolerances; those that clear it first. */
+function triedRemedies(design: DesignInput, content: VersionContent, findings: readonly Finding[]): TriedRemedy[] {
+  const stops = stopsIn(findings);
+  const proposals: Proposal[] = [
+    ...nearestFix(
+      design,
+      stops.map(({ code }) => code),
+      { seed: SEED, boxes: FIX_BOXES },
+    ),
+    ...stops.flatMap(({ code, remedy }) => (remedy ? [{ code, text: remedy.text, changes: remedy.changes }] : [])),
+  ];
+  const tried: TriedRemedy[] = [];
+  for (const proposal of proposals) {
+    if (tried.some(({ text }) => text === proposal.text)) continue;
+    const remedy = judged(content, proposal);
+    if (remedy) tried.push(remedy);
+  }
+  return tried.sort((a, b) => Number(a.stops.length > 0) - Number(b.stops.length > 0)).slice(0, MOST_REMEDIES);
+}
+
+function judged(content: VersionContent, { code, text, changes }: Proposal): TriedRemedy | null {
+  const change = versionChange(content, changes);
+  if (!change) return null;
+  const next = withChange(content, change);
+  const { design } = designOf(next);
+  const verdict = design && evaluateOrNull(design);
+  if (!verdict) return null;
+  const isQuantity = change.quantities.size > 0;
+  // What the rest of the version lacks, such as its guide, is no matter of this remedy.
+  const left = isQuantity ? allFindings(verdict, next).filter((stop) => stop.code === code) : verdict.findings;
   return {
-    ...content,
-    circuit,
-    lines: content.lines.map((line) => ({ ...line, quantity: quantities.get(line.reference) ?? line.quantity })),
+    text,
+    code,
+    change,
+    reach: isQuantity ? null : verdict.reach,
+    stops: stopsIn(left).map(({ message }) => message),
   };
 }
 
 function evaluateOrNull(design: DesignInput): Verdict | null {
   try {
-    return evaluate(design, { boxes: 0, seed: SEED });
+    return evaluate(design, { boxes: FIX_BOXES, seed: SEED });
   } catch (error) {
     if (error instanceof InvalidInput) return null;
     throw error;

@@ -1,5 +1,5 @@
 import type { Verdict } from '@/services/receiver';
-import type { Finding } from '@/services/kits/rules';
+import type { Finding, VersionChange } from '@/services/kits/rules';
 import type { VersionContent } from '@/services/kits/schemas';
 import type { ResponseSetting } from '@/components/charts/response-shape';
 
@@ -11,11 +11,12 @@ export interface VerdictRequest {
   boxes: number;
 }
 
-/** A version with a remedy's changes: what it is called, and what it comes to. */
+/** A way to mend a finding: its sentence, what it does to the version, and what that comes to. */
 export interface TriedRemedy {
   text: string;
   /** Finding that asks for it. */
   code: string;
+  change: VersionChange;
   /** Null where the set stays as it is and only a quantity changes. */
   reach: Verdict['reach'] | null;
   /** What it leaves unmended, or spoils: a sentence each. */
@@ -27,7 +28,8 @@ export interface LiveVerdict {
   findings: Finding[];
   contour: { f: number[]; share: number[] } | null;
   settings: ResponseSetting[];
-  remedies: TriedRemedy[];
+  /** Null in a first answer: they are looked for with the boxes. */
+  remedies: TriedRemedy[] | null;
 }
 
 export type VerdictAnswer = { number: number; boxes: number } & (

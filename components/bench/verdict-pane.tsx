@@ -106,7 +106,7 @@ function Worked({
           model={modelWords(live)}
         />
       </section>
-      {remedies.length > 0 && <RemedyCards band={band} remedies={remedies} onTry={onTry} />}
+      {remedies !== null && remedies.length > 0 && <RemedyCards band={band} remedies={remedies} onTry={onTry} />}
       <FindingList findings={findings} />
       <LimitList limits={verdict.limits} />
     </div>

@@ -8,11 +8,12 @@ import { Button } from '@/components/ui/button';
 import { Notice } from '@/components/ui/notice';
 import { ToastRegion, useToast } from '@/components/ui/toast';
 import type { VersionId } from '@/services/ids';
-import { contentMass, fieldOf, settingsFrom, stopsIn, wireNeeded } from '@/services/kits/rules';
+import { contentMass, fieldOf, stopsIn, wireNeeded } from '@/services/kits/rules';
 import type { LineView, StartVersion, VersionContent, VersionView } from '@/services/kits/schemas';
 import type { PartView, Place } from '@/services/parts/schemas';
 import type { ProblemView } from '@/services/problem';
 import { ConflictPanel } from './conflict-panel';
+import { findParts, otherPart } from './find-parts';
 import { FootBar } from './foot-bar';
 import { HeldPanel } from './held-panel';
 import { LinesPane } from './lines-pane';
@@ -88,14 +89,22 @@ function Bench({ view, mayEdit, deeds }: WorkbenchProps) {
     });
   }
 
-  function applyRemedy({ text, code }: TriedRemedy) {
-    const remedy = findings.find((one) => one.code === code && one.remedy?.text === text)?.remedy;
-    const changed = remedy && settingsFrom(content, remedy.changes);
-    if (!changed) return;
-    if (changed.circuit !== content.circuit) store.changeCircuit(changed.circuit);
-    for (const [reference, quantity] of changed.quantities) {
+  async function applyRemedy({ change }: TriedRemedy) {
+    const found = await findParts(change.wanted);
+    if (!found.ok) {
+      setProblem(found.problem);
+      return;
+    }
+    setProblem(null);
+    if (change.circuit !== content.circuit) store.changeCircuit(change.circuit);
+    for (const [reference, quantity] of change.quantities) {
       const line = lines.find((one) => one.reference === reference);
       if (line) store.changeLine(line.id, { quantity });
+    }
+    for (const { place, part } of found.parts) {
+      const line = lines.find((one) => one.place === place);
+      if (line) store.changeLine(line.id, otherPart(part));
+      else await addLine(place, part);
     }
   }
 
@@ -171,7 +180,12 @@ function Bench({ view, mayEdit, deeds }: WorkbenchProps) {
           tabIndex={0}
           className={`${pane === 'verdict' ? '' : 'hidden'} min-w-0 bg-card px-4 py-4 outline-offset-[-4px] sm:px-6 md:block md:overflow-y-auto`}
         >
-          <VerdictPane content={content} answer={answer} trying={trying} {...(canChange && { onTry: applyRemedy })} />
+          <VerdictPane
+            content={content}
+            answer={answer}
+            trying={trying}
+            {...(canChange && { onTry: (remedy) => void applyRemedy(remedy) })}
+          />
         </section>
       </div>
       <FootBar

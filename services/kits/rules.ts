@@ -4,7 +4,8 @@ import { type Finding, versionFindings } from './version-findings';
 
 export { type DesignOutcome, designOf, valuesAt } from './design-of';
 export { type Difference, differences, quantityWords } from './differences';
-export { type FindingField, fieldOf, settingsFrom } from './finding-place';
+export { type FindingField, fieldOf } from './finding-place';
+export { type PartWanted, type VersionChange, nearestPart, versionChange, withChange } from './remedy-changes';
 export { type Finding, versionFindings, wireNeeded } from './version-findings';
 
 /** Letters of versions leave out I, O, Q, S, X and Z (ASME Y14.35); after Y comes AA. */

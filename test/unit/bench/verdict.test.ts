@@ -3,7 +3,7 @@ import { answerTo } from '@/components/bench/verdict-handler';
 import type { LiveVerdict } from '@/components/bench/verdict-messages';
 import { headlineOf, shareWords } from '@/components/bench/verdict-words';
 import { evaluateContent } from '@/services/kits/evaluation';
-import { settingsFrom } from '@/services/kits/rules';
+import { stopsIn, withChange } from '@/services/kits/rules';
 import type { VersionContent } from '@/services/kits/schemas';
 import { canonicalJson } from '@/services/record';
 import { aVersion } from '../../builders/versions';
@@ -50,14 +50,21 @@ describe('the live verdict', () => {
 
   it('offers remedies that mend what they are for', () => {
     const content = aVersion().withTurns(62).plain();
-    const { remedies, findings } = live(content);
-    const remedy = remedies.find(({ code }) => code === 'BAND-LOW');
+    const remedy = live(content, 1000).remedies?.find(({ code }) => code === 'BAND-LOW');
     if (!remedy) throw new Error('62 turns are short at the low end, and more turns mend it.');
-    const changes = findings.find(({ code }) => code === 'BAND-LOW')?.remedy?.changes ?? [];
-    const changed = settingsFrom(content, changes);
-    const mended = live({ ...content, circuit: changed?.circuit ?? content.circuit });
+    const mended = live(withChange(content, remedy.change), 1000);
     expect(mended.findings.map(({ code }) => code)).not.toContain('BAND-LOW');
-    expect(remedy.stops.filter((sentence) => sentence.includes('lowest'))).toEqual([]);
+    expect(remedy.stops).toEqual(stopsIn(mended.verdict.findings).map(({ message }) => message));
+  });
+
+  it('does not call a remedy clear while the other end is short', () => {
+    const content = aVersion().withPart('C1', 'C-220').plain();
+    const codes = stopsIn(live(content).findings).map(({ code }) => code);
+    const remedies = live(content, 1000).remedies ?? [];
+    expect(codes).toContain('BAND-LOW');
+    for (const { change, stops } of remedies) {
+      if (stops.length === 0) expect(stopsIn(live(withChange(content, change)).verdict.findings)).toEqual([]);
+    }
   });
 });
 

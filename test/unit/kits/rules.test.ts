@@ -7,13 +7,14 @@ import {
   letterAfter,
   mayBecome,
   partsOfBox,
-  settingsFrom,
+  nearestPart,
+  versionChange,
   versionFindings,
   wireNeeded,
 } from '@/services/kits/rules';
 import { VersionState } from '@/services/kits/schemas';
 import { evaluate } from '@/services/receiver';
-import { aVersion } from '../../builders/versions';
+import { aVersion, someParts } from '../../builders/versions';
 
 describe('version letters', () => {
   it('leave out I, O, Q, S, X and Z, and go on with AA after Y', () => {
@@ -92,7 +93,7 @@ describe('findings of the version itself', () => {
     const short = aVersion().withQuantity('L1', 9_000).plain();
     const [finding] = versionFindings(short);
     expect(finding).toMatchObject({ code: 'WIRE-SHORT', severity: 'stop' });
-    const changed = settingsFrom(short, finding?.remedy?.changes ?? []);
+    const changed = versionChange(short, finding?.remedy?.changes ?? []);
     const mended = short.lines.map((line) => ({
       ...line,
       quantity: changed?.quantities.get(line.reference) ?? line.quantity,
@@ -161,10 +162,19 @@ describe('where a finding points', () => {
     expect(fieldOf(path)).toEqual(field);
   });
 
-  it('a remedy that asks for another part is left to a person', () => {
+  it('a remedy that asks for closer tolerances is left to a person', () => {
     const plain = aVersion().plain();
-    expect(settingsFrom(plain, [{ path: 'coupling.c', from: 1.2e-11, to: 8e-12 }])).toBeNull();
-    expect(settingsFrom(plain, [{ path: 'coil.turns', from: 72, to: 74 }])?.circuit.winding.turns).toBe(74);
+    expect(versionChange(plain, [{ path: 'tuning.max.tol', from: 0.05, to: 0.02 }])).toBeNull();
+    expect(versionChange(plain, [{ path: 'coil.turns', from: 72, to: 74 }])?.circuit.winding.turns).toBe(74);
+  });
+
+  it('a remedy that asks for another capacitor finds the nearest one that is kept, or none', () => {
+    const plain = aVersion().plain();
+    const [wanted] = versionChange(plain, [{ path: 'coupling.c.nominal', from: 2.2e-11, to: 1.25e-11 }])?.wanted ?? [];
+    expect(wanted).toEqual({ place: 'coupling capacitor', value: 1.25e-11 });
+    if (!wanted) throw new Error('nothing wanted');
+    expect(nearestPart(wanted, someParts)?.code).toBe('CC-12');
+    expect(nearestPart({ ...wanted, value: 3.3e-11 }, someParts)).toBeNull();
   });
 });
 
