@@ -57,6 +57,9 @@ function optionOf(part: PartView) {
   };
 }
 
+/** Before anything is typed: a list closes when the page scrolls under it. One function, so that it runs once. */
+const bringIntoSight = (box: HTMLElement | null) => box?.scrollIntoView({ block: 'nearest' });
+
 /** The foot of a group: press, then look for the part. */
 export function AddLine({
   places,
@@ -77,8 +80,7 @@ export function AddLine({
   }
   return (
     <div
-      // Into sight before anything is typed: a list closes when the page scrolls under it.
-      ref={(box) => box?.scrollIntoView({ block: 'nearest' })}
+      ref={bringIntoSight}
       className="grid scroll-mb-60 gap-3 rounded-label border-1.5 border-dashed border-edge p-3"
     >
       {places.length > 1 && (

@@ -7,6 +7,8 @@ import type { VerdictAnswer, VerdictRequest } from './verdict-messages';
 /** Boxes of the quick refinement and of the one that equals the check sheet's. */
 const QUICK = 2_000;
 export const FULL = 20_000;
+/** How long nothing is typed before the boxes are tried: while a slider moves, only first verdicts are worked out. */
+const SHORT_PAUSE_MS = 100;
 /** How long nothing is typed before the long one starts. */
 const PAUSE_MS = 500;
 
@@ -32,25 +34,27 @@ export function useVerdict(content: VersionContent): VerdictState {
     const held = workers.current;
     const number = ++held.number;
     const take = (answer: VerdictAnswer, trying: number) => {
-      if (answer.number === held.number)
-        setState((before) => ({ answer: withRemedies(answer, before.answer), trying }));
+      if (answer.number !== held.number) return;
+      setState((before) =>
+        isFuller(before.answer, answer) ? before : { answer: withRemedies(answer, before.answer), trying },
+      );
     };
 
     held.quick ??= start();
     held.quick.onmessage = ({ data }: MessageEvent<VerdictAnswer>) => {
       if (data.kind !== 'verdict') take(data, 0);
       else take(data, data.boxes === 0 ? QUICK : FULL);
-      if (data.number === held.number && data.kind === 'verdict' && data.boxes === 0)
-        ask(held.quick, { number, content, boxes: QUICK });
     };
     ask(held.quick, { number, content, boxes: 0 });
 
+    const soon = setTimeout(() => ask(held.quick, { number, content, boxes: QUICK }), SHORT_PAUSE_MS);
     const timer = setTimeout(() => {
       held.full = start();
       held.full.onmessage = ({ data }: MessageEvent<VerdictAnswer>) => take(data, 0);
       ask(held.full, { number, content, boxes: FULL });
     }, PAUSE_MS);
     return () => {
+      clearTimeout(soon);
       clearTimeout(timer);
       held.full?.terminate();
       held.full = null;
@@ -67,6 +71,10 @@ export function useVerdict(content: VersionContent): VerdictState {
 
   return state;
 }
+
+/** The two workers may answer out of turn: the one with more boxes stands. */
+const isFuller = (shown: VerdictAnswer | null, answer: VerdictAnswer) =>
+  shown !== null && shown.number === answer.number && shown.boxes > answer.boxes;
 
 /** A first answer has no remedies yet; the last ones stay in sight for the moment until the new ones are found. */
 function withRemedies(answer: VerdictAnswer, before: VerdictAnswer | null): VerdictAnswer {
