@@ -86,55 +86,57 @@ export function BoxTraceView({ trace }: { trace: TraceView }) {
         </dl>
         <p className="font-figures text-body break-all">content {trace.contentHash}</p>
       </section>
-      <Table<Row>
-        caption="Lots in this box"
-        captionShown
-        density="desk"
-        className="text-floor"
-        rows={trace.lines.flatMap(rowsOf)}
-        rowKey={({ line, lot }) => `${line.reference} ${lot?.lotCode ?? ''} ${lot?.binCode ?? ''}`}
-        rowTone={({ lot }) => (lot?.blocked ? 'stops' : undefined)}
-        columns={[
-          { key: 'line', head: 'Line', cell: ({ line }) => <span className="font-figures">{line.reference}</span> },
-          {
-            key: 'part',
-            head: 'Part',
-            isRowHead: true,
-            cell: ({ line }) => (
-              <>
-                {line.name} <span className="font-figures font-normal text-ink2">{line.partCode}</span>
-              </>
-            ),
-          },
-          {
-            key: 'amount',
-            head: 'In the box',
-            cell: ({ line, lot }) => (lot ? `${lot.amount} of ${line.needed}` : `none of ${line.needed}`),
-          },
-          {
-            key: 'lot',
-            head: 'Lot',
-            cell: ({ lot }) =>
-              lot ? (
+      <section>
+        <h3 className="mb-2 font-display text-panel">Lots in this box</h3>
+        <Table<Row>
+          caption="Lots in this box"
+          density="desk"
+          className="text-floor"
+          rows={trace.lines.flatMap(rowsOf)}
+          rowKey={({ line, lot }) => `${line.reference} ${lot?.lotCode ?? ''} ${lot?.binCode ?? ''}`}
+          rowTone={({ lot }) => (lot?.blocked ? 'stops' : undefined)}
+          columns={[
+            { key: 'line', head: 'Line', cell: ({ line }) => <span className="font-figures">{line.reference}</span> },
+            {
+              key: 'part',
+              head: 'Part',
+              isRowHead: true,
+              cell: ({ line }) => (
                 <>
-                  <TextLink href={`/packing/trace?code=${encodeURIComponent(lot.lotCode)}`} className="font-figures">
-                    {lot.lotCode}
-                  </TextLink>
-                  {lot.blocked && <b className="text-crimson"> blocked</b>}
+                  {line.name} <span className="font-figures font-normal text-ink2">{line.partCode}</span>
                 </>
-              ) : (
-                ''
               ),
-          },
-          {
-            key: 'supplier',
-            head: 'Supplier',
-            cell: ({ lot }) => (lot ? `${lot.supplier}, ${showDate(lot.receivedAt)}` : ''),
-          },
-          { key: 'bin', head: 'Bin', cell: ({ lot }) => <span className="font-figures">{lot?.binCode ?? ''}</span> },
-          { key: 'picked', head: 'Picked', cell: ({ lot }) => (lot ? `${showMoment(lot.at)}, ${lot.by}` : '') },
-        ]}
-      />
+            },
+            {
+              key: 'amount',
+              head: 'In the box',
+              cell: ({ line, lot }) => (lot ? `${lot.amount} of ${line.needed}` : `none of ${line.needed}`),
+            },
+            {
+              key: 'lot',
+              head: 'Lot',
+              cell: ({ lot }) =>
+                lot ? (
+                  <>
+                    <TextLink href={`/packing/trace?code=${encodeURIComponent(lot.lotCode)}`} className="font-figures">
+                      {lot.lotCode}
+                    </TextLink>
+                    {lot.blocked && <b className="text-crimson"> blocked</b>}
+                  </>
+                ) : (
+                  ''
+                ),
+            },
+            {
+              key: 'supplier',
+              head: 'Supplier',
+              cell: ({ lot }) => (lot ? `${lot.supplier}, ${showDate(lot.receivedAt)}` : ''),
+            },
+            { key: 'bin', head: 'Bin', cell: ({ lot }) => <span className="font-figures">{lot?.binCode ?? ''}</span> },
+            { key: 'picked', head: 'Picked', cell: ({ lot }) => (lot ? `${showMoment(lot.at)}, ${lot.by}` : '') },
+          ]}
+        />
+      </section>
     </div>
   );
 }

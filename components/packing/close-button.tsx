@@ -6,25 +6,29 @@ export interface CloseButtonProps {
   onClose: () => void;
 }
 
-/** "Close the box", dashed and locked while anything is missing; every reason stands beside it. */
+/** "Close the box"; dashed and locked while anything is missing. The reasons stand above it, and are read out with it. */
 export function CloseButton({ reasons, isBusy, onClose }: CloseButtonProps) {
-  if (reasons.length > 0) {
+  if (reasons.length > 0)
     return (
-      <div className="rounded-control border-2 border-dashed border-edge bg-well px-4 py-3 text-ink">
-        <Button size="floor" lockedReason={reasons.join(' ')} reasonSide="hidden" className="w-full">
-          Close the box
-        </Button>
-        <ul className="mt-2 list-disc pl-6 leading-6">
-          {reasons.map((reason) => (
-            <li key={reason}>{reason}</li>
-          ))}
-        </ul>
-      </div>
+      <CloseLocked reason={reasons.length === 1 ? '1 thing to do' : `${reasons.length} things to do`} more={reasons} />
     );
-  }
   return (
     <Button variant="cream" size="floor" icon="lock" pending={isBusy} onClick={onClose} className="w-full">
       Close the box
     </Button>
+  );
+}
+
+/** The locked button with how much is to go. */
+export function CloseLocked({ reason, more = [] }: { reason: string; more?: readonly string[] }) {
+  return (
+    <span className="grid *:w-full">
+      <Button size="floor" lockedReason={[reason, ...more].join('. ')} reasonSide="hidden" className="w-full px-3">
+        <span className="grid gap-1 text-left leading-5">
+          Close the box
+          <span className="text-floor font-normal">{reason}</span>
+        </span>
+      </Button>
+    </span>
   );
 }

@@ -7,7 +7,7 @@ export interface CodeFieldProps {
   ref: RefObject<HTMLInputElement | null>;
   value: string;
   onChange: (value: string) => void;
-  onSend: () => void;
+  onSend: (code: string) => void;
 }
 
 /**
@@ -21,11 +21,12 @@ export function CodeField({ ref, value, onChange, onSend }: CodeFieldProps) {
     <form
       onSubmit={(event) => {
         event.preventDefault();
-        onSend();
+        // A scanner is faster than the page is drawn, so the field itself is asked.
+        onSend(ref.current?.value ?? value);
       }}
-      className="flex min-h-floor items-stretch rounded-control border-2 border-on-enamel bg-card text-ink focus-within:outline-3 focus-within:outline-offset-2 focus-within:outline-[#fcf9f2]"
+      className="flex min-h-floor min-w-0 items-stretch rounded-control border-2 border-on-enamel bg-card text-ink focus-within:outline-3 focus-within:outline-offset-2 focus-within:outline-[#fcf9f2]"
     >
-      <label htmlFor={id} className="flex items-center gap-2 pl-4 font-bold">
+      <label htmlFor={id} className="flex shrink-0 items-center gap-2 pl-4 font-bold">
         <Icon name="hand" size={26} />
         Type a code
       </label>
@@ -41,7 +42,7 @@ export function CodeField({ ref, value, onChange, onSend }: CodeFieldProps) {
         autoComplete="off"
         autoCapitalize="characters"
         spellCheck={false}
-        className="min-w-0 flex-1 bg-transparent px-3 font-figures uppercase outline-none"
+        className="w-0 min-w-0 flex-1 bg-transparent px-3 font-figures uppercase outline-none"
       />
       <button type="submit" className="min-w-floor rounded-r-control bg-plate-deep px-4 font-bold text-on-enamel">
         Enter

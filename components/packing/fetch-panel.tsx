@@ -2,8 +2,9 @@ import { Button } from '@/components/ui/button';
 import { Notice } from '@/components/ui/notice';
 import { pieces as piecesWords } from '@/services/packing/rules';
 import type { BoxView, TrayPlace } from '@/services/packing/schemas';
-import { CloseButton } from './close-button';
+import { CloseLocked } from './close-button';
 import { CodeField, type CodeFieldProps } from './code-field';
+import { PanelFrame } from './panel-frame';
 import { PartPicture } from './part-picture';
 import { ScanAnswer } from './scan-answer';
 import type { Answer } from './use-box';
@@ -24,11 +25,34 @@ export function FetchPanel({ box, answer, dismiss, scan, isBusy, field, onEmpty 
   const then = box.places.filter((place) => place.state === 'waiting').slice(0, 3);
   const left = box.pieces.needed - box.pieces.packed;
   return (
-    <>
+    <PanelFrame
+      attention={answer}
+      foot={
+        <>
+          <CodeField {...field} />
+          <div className="grid grid-cols-[auto_minmax(0,1fr)] gap-3">
+            {next ? (
+              <Button
+                variant="outline"
+                size="floor"
+                pending={isBusy}
+                className="px-4"
+                onClick={() => onEmpty(next.lineId)}
+              >
+                Bin is empty
+              </Button>
+            ) : (
+              <span />
+            )}
+            <CloseLocked reason={`${piecesWords(left)} to go`} />
+          </div>
+        </>
+      }
+    >
       {next ? <Next place={next} /> : <NothingLeft />}
       <ScanAnswer answer={answer} dismiss={dismiss} onRest={(code, pieces) => void scan(code, pieces)} />
       {then.length > 0 && (
-        <div className="[@media(max-height:820px)]:hidden">
+        <div>
           <h3 className="text-body font-bold">Then</h3>
           <ul className="text-on-enamel2">
             {then.map((place) => (
@@ -40,18 +64,7 @@ export function FetchPanel({ box, answer, dismiss, scan, isBusy, field, onEmpty 
           </ul>
         </div>
       )}
-      <div className="mt-auto grid gap-3">
-        <div className="grid gap-3 xl:grid-cols-[1fr_auto]">
-          <CodeField {...field} />
-          {next && (
-            <Button variant="outline" size="floor" pending={isBusy} onClick={() => onEmpty(next.lineId)}>
-              Bin is empty
-            </Button>
-          )}
-        </div>
-        <CloseButton reasons={[`${piecesWords(left)} to go.`]} isBusy={isBusy} onClose={() => undefined} />
-      </div>
-    </>
+    </PanelFrame>
   );
 }
 
@@ -59,17 +72,20 @@ function Next({ place }: { place: TrayPlace }) {
   return (
     <div>
       <p className="text-[20px] leading-[26px] text-on-enamel2">Fetch from bin</p>
-      <p className="font-display text-bin">{place.suggestion?.binCode}</p>
+      <p className="font-display text-bin [@media(max-height:840px)]:-my-2">{place.suggestion?.binCode}</p>
       <h2 className="font-display text-[30px] leading-9">{place.name}</h2>
       <div className="mt-3 grid grid-cols-[1fr_auto] items-center gap-4 rounded-panel bg-card px-5 py-3 text-ink">
-        <PartPicture family={place.family} height={96} className="mx-auto max-w-full" />
-        <p className="max-w-40 text-[17px] leading-6">
-          <b className="block font-figures text-[44px] leading-[50px] font-semibold whitespace-nowrap">
+        <PartPicture family={place.family} height={96} className="mx-auto max-w-full [@media(max-height:840px)]:h-16" />
+        <p className="text-[17px] leading-6">
+          <b className="block font-figures text-[44px] leading-[50px] font-semibold whitespace-nowrap [@media(max-height:840px)]:text-[32px] [@media(max-height:840px)]:leading-9">
             {place.amount}
           </b>
-          {place.note !== '' && <span className="block">{place.note}</span>}
+          {place.note !== '' && <span className="block max-w-48">{place.note}</span>}
           <span className="block">
-            line <b>{place.reference}</b>, lot <b className="font-figures">{place.suggestion?.lotCode}</b>
+            line <b className="font-figures">{place.reference}</b>
+          </span>
+          <span className="block whitespace-nowrap">
+            lot <b className="font-figures">{place.suggestion?.lotCode}</b>
           </span>
         </p>
       </div>

@@ -5,6 +5,7 @@ import { showClock } from '@/services/time';
 import { CloseButton } from './close-button';
 import { CodeField, type CodeFieldProps } from './code-field';
 import type { BoxDeeds } from './deeds';
+import { PanelFrame } from './panel-frame';
 import { PrintRow } from './print-row';
 import { ScanAnswer } from './scan-answer';
 import type { Answer } from './use-box';
@@ -25,9 +26,21 @@ export function LidPanel({ box, answer, dismiss, deeds, change, isBusy, field }:
   const name = `${box.plate.kitNumber} ${box.plate.letter}`;
   const isReleased = box.versionState === 'released';
   return (
-    <>
+    <PanelFrame
+      attention={answer}
+      foot={
+        <>
+          <CodeField {...field} />
+          <CloseButton
+            reasons={box.reasons}
+            isBusy={isBusy}
+            onClose={() => void change(() => deeds.closeBox({ boxId: box.id }))}
+          />
+        </>
+      }
+    >
       <h2 className="font-display text-[30px] leading-9">Everything is in</h2>
-      <p className="text-on-enamel2">Print, scan the guide, weigh, and close the lid.</p>
+      <ScanAnswer answer={answer} dismiss={dismiss} />
       <div className="rounded-panel bg-card px-4 py-3 text-ink">
         <p className="flex items-center gap-2 font-bold">
           <Sign kind={isReleased ? 'clears' : 'stops'} size={24} />
@@ -73,15 +86,16 @@ export function LidPanel({ box, answer, dismiss, deeds, change, isBusy, field }:
           onWeigh={(milligrams) => change(() => deeds.weigh({ boxId: box.id, milligrams }))}
         />
       </ol>
-      <ScanAnswer answer={answer} dismiss={dismiss} />
-      <div className="mt-auto grid gap-3">
-        <CodeField {...field} />
-        <CloseButton
-          reasons={box.reasons}
-          isBusy={isBusy}
-          onClose={() => void change(() => deeds.closeBox({ boxId: box.id }))}
-        />
-      </div>
-    </>
+      {box.reasons.length > 0 && (
+        <div>
+          <h3 className="text-body font-bold">Before the lid closes</h3>
+          <ul className="list-disc pl-6 text-on-enamel2">
+            {box.reasons.map((reason) => (
+              <li key={reason}>{reason}</li>
+            ))}
+          </ul>
+        </div>
+      )}
+    </PanelFrame>
   );
 }

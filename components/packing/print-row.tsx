@@ -30,7 +30,7 @@ export function PrintRow({ box, paper, printedAt, isLocked, isBusy, onPrinted }:
         <b>{printedAt === null ? `Print the ${name}` : `The ${name} is printed, ${showClock(printedAt)}`}</b>
       </span>
       {!isLocked && (
-        <span className="flex flex-wrap gap-3">
+        <span className="grid auto-cols-fr grid-flow-col gap-3">
           <LinkButton
             href={href}
             target="_blank"
@@ -38,7 +38,7 @@ export function PrintRow({ box, paper, printedAt, isLocked, isBusy, onPrinted }:
             size="floor"
             icon="print"
             onClick={() => setOpened(true)}
-            className="flex-1"
+            className="px-2"
           >
             A4
           </LinkButton>
@@ -49,20 +49,12 @@ export function PrintRow({ box, paper, printedAt, isLocked, isBusy, onPrinted }:
             size="floor"
             icon="print"
             onClick={() => setOpened(true)}
-            className="flex-1"
+            className="px-2"
           >
             Letter
           </LinkButton>
-          {printedAt === null && (
-            <Button
-              variant="primary"
-              size="floor"
-              pending={isBusy}
-              className="flex-1"
-              {...(wasOpened
-                ? { onClick: onPrinted }
-                : { lockedReason: `Print the ${name} first.`, reasonSide: 'hidden' as const })}
-            >
+          {printedAt === null && wasOpened && (
+            <Button variant="primary" size="floor" pending={isBusy} onClick={onPrinted} className="px-2">
               It is printed
             </Button>
           )}

@@ -1,4 +1,5 @@
 import { Button } from '@/components/ui/button';
+import { classes } from '@/components/ui/classes';
 import { Notice } from '@/components/ui/notice';
 import { showClock } from '@/services/time';
 import type { Answer } from './use-box';
@@ -12,11 +13,15 @@ export interface ScanAnswerProps {
 
 /**
  * The last scan in shape, word and colour. A wrong one stays until the next right scan, or until the packer says that
- * the piece was put back.
+ * the piece was put back; it stands over everything else.
  */
 export function ScanAnswer({ answer, dismiss, onRest }: ScanAnswerProps) {
   return (
-    <div role="status" aria-live="assertive" className="empty:hidden">
+    <div
+      role="status"
+      aria-live="assertive"
+      className={classes('empty:hidden', answer !== null && answer.kind !== 'right' && 'order-first')}
+    >
       {answer?.kind === 'right' && (
         <Notice
           kind="clears"

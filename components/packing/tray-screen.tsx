@@ -35,7 +35,7 @@ export function TrayScreen({ initial, mayPack, deeds }: TrayScreenProps) {
   );
   useScanner(scanField, onScan);
 
-  const field = { ref: scanField, value: code, onChange: setCode, onSend: () => onScan(code) };
+  const field = { ref: scanField, value: code, onChange: setCode, onSend: onScan };
   const isFull = box.pieces.packed === box.pieces.needed;
 
   return (
@@ -52,10 +52,12 @@ export function TrayScreen({ initial, mayPack, deeds }: TrayScreenProps) {
       <div className="grid min-h-0 md:grid-cols-[minmax(0,1fr)_minmax(380px,34%)]">
         <TrayView
           box={box}
-          wrongLine={null}
           onPutBack={inHands ? (lineId) => change(() => deeds.putBack({ boxId: box.id, lineId })) : null}
         />
-        <section aria-label="What to do" className="ground-plate flex min-h-0 flex-col gap-3 overflow-y-auto px-6 py-5">
+        <section
+          aria-label="What to do"
+          className="ground-plate flex min-h-0 flex-col gap-3 px-6 py-4 max-md:order-first"
+        >
           {!inHands ? (
             <HandsPanel
               box={box}

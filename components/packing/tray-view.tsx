@@ -1,8 +1,9 @@
 'use client';
 
-import { useState } from 'react';
+import { useEffect, useRef, useState } from 'react';
 import { Tray, TrayPlace, type PlaceState } from '@/components/devices/tray';
 import { Button } from '@/components/ui/button';
+import { classes } from '@/components/ui/classes';
 import { Dialog } from '@/components/ui/dialog';
 import { amountText, lowerFirst } from '@/services/packing/rules';
 import type { BoxView, TrayPlace as Place } from '@/services/packing/schemas';
@@ -10,7 +11,6 @@ import { PartPicture } from './part-picture';
 
 export interface TrayViewProps {
   box: BoxView;
-  wrongLine: string | null;
   /** Null where nothing may be taken out. */
   onPutBack: ((lineId: string) => Promise<boolean>) | null;
 }
@@ -20,29 +20,41 @@ const states: Record<Place['state'], PlaceState> = { waiting: 'waiting', next: '
 /** The tray in plan: a place a line, then the guide. A place with something in it can be pressed to put a piece back. */
 export function TrayView({ box, onPutBack }: TrayViewProps) {
   const [asked, setAsked] = useState<Place | null>(null);
+  const tray = useRef<HTMLElement>(null);
+  // A fifth column keeps a box of many lines on one screen.
+  const isCrowded = box.places.length > 11;
   const isLocked = box.pieces.packed < box.pieces.needed;
+  // A long tray scrolls; the place that is next is always in sight.
+  useEffect(() => {
+    tray.current?.querySelector('[data-state=next]')?.scrollIntoView({ block: 'nearest' });
+  }, [box.nextLineId]);
+
   return (
-    <section aria-label="Tray" className="min-h-0 overflow-y-auto p-4 sm:p-5">
-      <Tray label="Places of the tray" className="min-h-full">
+    <section ref={tray} aria-label="Tray" className="min-h-0 overflow-y-auto p-4 sm:p-5">
+      <Tray label="Places of the tray" className={classes('min-h-full', isCrowded && 'lg:grid-cols-5')}>
         {box.places.map((place) => (
           <TrayPlace
             key={place.lineId}
             state={states[place.state]}
             name={shortName(place)}
             drawing={
-              <PlaceDrawing place={place} onPress={onPutBack && place.packed > 0 ? () => setAsked(place) : null} />
+              <PlaceDrawing
+                place={place}
+                height={isCrowded ? 52 : 80}
+                onPress={onPutBack && place.packed > 0 ? () => setAsked(place) : null}
+              />
             }
             have={place.unit === 'each' ? place.packed : place.state === 'in' ? 1 : 0}
             need={place.unit === 'each' ? place.needed : 1}
             bin={place.suggestion?.binCode}
             word={place.suggestion === null ? 'told' : undefined}
-            span={place.kind === 'coil-former' ? 2 : 1}
+            span={place.kind === 'coil-former' && !isCrowded ? 2 : 1}
           />
         ))}
         <TrayPlace
           state={box.guide.scannedAt !== null ? 'in' : isLocked ? 'waiting' : 'next'}
           name={`Guide ${box.plate.kitNumber} ${box.plate.letter}`}
-          drawing={<PartPicture family="guide" height={72} />}
+          drawing={<PartPicture family="guide" height={isCrowded ? 52 : 80} />}
           have={box.guide.scannedAt === null ? 0 : 1}
           need={1}
           bin="print"
@@ -76,14 +88,16 @@ export function TrayView({ box, onPutBack }: TrayViewProps) {
   );
 }
 
-/** "Wire, 14 m": a cut length says its length; pieces are counted below. */
-const shortName = (place: Place) =>
-  place.unit === 'each' ? place.name : `${place.name}, ${amountText(place.needed, place.unit)}`;
+/** "Enamelled wire, 14 m": what tells parts apart stands in full at the right; a cut length always says its length. */
+const shortName = (place: Place) => {
+  const [what = place.name] = place.name.split(',');
+  return place.unit === 'each' ? what : `${what}, ${amountText(place.needed, place.unit)}`;
+};
 
 const oneOf = (place: Place) => (place.unit === 'each' ? `one ${lowerFirst(place.name)}` : lowerFirst(place.name));
 
-function PlaceDrawing({ place, onPress }: { place: Place; onPress: (() => void) | null }) {
-  const picture = <PartPicture family={place.family} height={place.kind === 'coil-former' ? 96 : 72} />;
+function PlaceDrawing({ place, height, onPress }: { place: Place; height: number; onPress: (() => void) | null }) {
+  const picture = <PartPicture family={place.family} height={height} />;
   if (!onPress) return picture;
   return (
     <button

@@ -3,7 +3,7 @@
 import { type RefObject, useEffect, useRef } from 'react';
 
 /** A scanner types faster than any hand: gaps up to this are one code. Milliseconds. */
-const fastest = 40;
+const fastest = 60;
 /** A burst of fewer characters is no code of ours. */
 const shortest = 4;
 
@@ -16,8 +16,9 @@ interface Burst {
 }
 
 /**
- * Hears a scanner wherever the focus is. A scanner is a keyboard that ends with Enter: its burst is taken out of
- * whatever it was typed into, and its Enter presses nothing. What a hand types outside a field goes into the scan field.
+ * Hears a scanner wherever the focus is. A scanner is a keyboard that ends with Enter. What is typed outside a field,
+ * by scanner or by hand, goes into the scan field, whose form sends it; a burst that lands in another field is taken out
+ * of it again, and its Enter presses nothing.
  */
 export function useScanner(scanField: RefObject<HTMLInputElement | null>, onScan: (code: string) => void): void {
   const heard = useRef(onScan);
@@ -30,7 +31,14 @@ export function useScanner(scanField: RefObject<HTMLInputElement | null>, onScan
 
     function hear(event: KeyboardEvent) {
       if (event.ctrlKey || event.metaKey || event.altKey || event.isComposing) return;
-      const isFast = event.timeStamp - burst.lastAt <= fastest;
+      if (event.target === scanField.current && event.target !== null) return;
+      const field = editable(event.target);
+      if (field === null) {
+        // The key itself still lands in the field that has the focus then.
+        if (event.key.length === 1 && event.key !== ' ') scanField.current?.focus({ preventScroll: true });
+        return;
+      }
+      const isFast = event.timeStamp - burst.lastAt <= fastest && burst.field === field;
       if (event.key === 'Enter') {
         if (isFast && burst.text.length >= shortest) {
           event.preventDefault();
@@ -42,13 +50,9 @@ export function useScanner(scanField: RefObject<HTMLInputElement | null>, onScan
         return;
       }
       if (event.key.length !== 1) return;
-      const field = editable(event.target);
-      if (!isFast) burst = { text: '', lastAt: 0, field, before: field?.value ?? '' };
+      if (!isFast) burst = { text: '', lastAt: 0, field, before: field.value };
       burst.text += event.key;
       burst.lastAt = event.timeStamp;
-      if (field === null && event.key !== ' ') scanField.current?.focus({ preventScroll: true });
-      // A blank inside a burst would press the button that has the focus.
-      if (field === null && event.key === ' ' && burst.text.length > 1) event.preventDefault();
     }
 
     document.addEventListener('keydown', hear, { capture: true });
