@@ -45,7 +45,7 @@ export default async function CataloguePage({ searchParams }: { searchParams: Se
         {kits.length > 0 ? (
           <ul className="grid gap-6 sm:grid-cols-2 lg:grid-cols-4">
             {kits.map((kit) => (
-              <KitCard key={kit.kitId} kit={kit} />
+              <KitCard key={kit.kitId} kit={kit} level={q === '' ? 3 : 2} />
             ))}
           </ul>
         ) : q === '' ? (

@@ -51,7 +51,7 @@ function wordsOf(one: Waiting): { sign: SignKind; title: string; text: string; h
         sign: 'stops',
         title: `${one.name} ${one.letter} was held`,
         text: one.why,
-        href: `/check/${one.versionId}`,
+        href: `/bench/${one.versionId}`,
         word: 'Read it',
       };
     case 'price':

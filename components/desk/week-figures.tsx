@@ -10,7 +10,7 @@ export function WeekFigures({ today }: { today: Today }) {
     { figure: `${figures.boxesSent}`, words: figures.boxesSent === 1 ? 'box sent' : 'boxes sent' },
     {
       figure: figures.hoursToSend === null ? '–' : hours(figures.hoursToSend),
-      words: figures.hoursToSend === null ? 'nothing was sent yet' : 'median, paid to sent',
+      words: figures.hoursToSend === null ? 'nothing sent in seven days' : 'median, paid to sent',
     },
     {
       figure: formatMoney(figures.refunded),
@@ -19,8 +19,8 @@ export function WeekFigures({ today }: { today: Today }) {
   ];
   return (
     <div className="ground-plate">
-      <div className="mx-auto grid max-w-desk gap-y-4 px-4 py-5 sm:grid-cols-2 sm:px-6 lg:grid-cols-[1.35fr_repeat(4,1fr)]">
-        <div className="sm:max-lg:col-span-2">
+      <div className="mx-auto grid max-w-desk grid-cols-2 gap-y-4 px-4 py-5 sm:px-6 lg:grid-cols-[1.35fr_repeat(4,1fr)]">
+        <div className="max-lg:col-span-2">
           <h1 className="font-display text-page">Today</h1>
           <p className="text-on-enamel2">{showDate(at)}</p>
         </div>

@@ -11,6 +11,7 @@ import { Notice } from '@/components/ui/notice';
 import { QuantityStepper } from '@/components/ui/quantity-stepper';
 import { formatMoney } from '@/services/money';
 import type { BasketLine, BasketView, ChangeBasket } from '@/services/orders/schemas';
+import { EmptyBasket } from './empty-basket';
 
 type ChangeLine = Action<Omit<ChangeBasket, 'basketId'>, BasketView>;
 
@@ -28,6 +29,7 @@ export function BasketLines({ first, onChange }: { first: BasketView; onChange: 
     if (answer.ok) setBasket(answer.value);
   }
 
+  if (basket.lines.length === 0) return <EmptyBasket />;
   const blocked = basket.lines.some((line) => line.trouble !== null);
   return (
     <div className="grid items-start gap-x-11 gap-y-6 md:grid-cols-[minmax(0,1fr)_minmax(0,22rem)]">

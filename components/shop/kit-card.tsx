@@ -9,7 +9,8 @@ import { lookOf } from './kit-look';
 import { ReadyWords } from './ready-words';
 
 /** A kit in the catalogue. The whole card leads to its page; its name is the link that readers hear. */
-export function KitCard({ kit }: { kit: Kit }) {
+export function KitCard({ kit, level = 3 }: { kit: Kit; level?: 2 | 3 }) {
+  const Heading = `h${level}` as const;
   const price = kit.prices[0]?.unit;
   return (
     <li className="relative flex flex-col overflow-hidden rounded-panel border border-rule bg-card focus-within:outline-3 focus-within:outline-offset-2 focus-within:outline-enamel hover:border-ink">
@@ -19,11 +20,11 @@ export function KitCard({ kit }: { kit: Kit }) {
       </div>
       <div className="flex flex-1 flex-col px-4 pt-3 pb-4">
         <div className="flex items-baseline justify-between gap-3">
-          <h3 className="font-display text-panel">
+          <Heading className="font-display text-panel">
             <Link href={`/kits/${kit.code}`} className="outline-none after:absolute after:inset-0">
               {kit.name}
             </Link>
-          </h3>
+          </Heading>
           {price && <b className="font-figures text-value whitespace-nowrap">{formatMoney(price)}</b>}
         </div>
         <p className="mt-1 mb-3 text-caption">{kit.summary}</p>

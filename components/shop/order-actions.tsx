@@ -43,11 +43,7 @@ export function OrderActions({ order, orderRef, onPay, onCancel, onClaim }: Orde
           You pay by card on our payment provider’s page. Nothing is sent before the money is here.
         </p>
       ) : (
-        <p className="mb-4">
-          {order.invoice
-            ? 'Keep the invoice; each guide belongs to its own box.'
-            : 'There is no invoice for this order.'}
-        </p>
+        <p className="mb-4">{papersWords(order)}</p>
       )}
       <div className="grid gap-3">
         {order.may.pay && (
@@ -119,3 +115,10 @@ export function OrderActions({ order, orderRef, onPay, onCancel, onClaim }: Orde
 }
 
 const keyQuery = ({ key }: OrderRef) => (key === undefined ? '' : `?key=${encodeURIComponent(key)}`);
+
+function papersWords(order: OrderView): string {
+  if (!order.invoice) return 'There is no invoice for this order.';
+  return order.fulfilment === 'cancelled'
+    ? 'The invoice stays yours to read; what was paid back is listed below.'
+    : 'Keep the invoice; each guide belongs to its own box.';
+}

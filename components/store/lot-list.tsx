@@ -12,8 +12,11 @@ import { sayQuantity } from '@/services/stock/rules';
 import type { AcceptLot, BlockLot, LotState, StoredLot, StoredPart } from '@/services/stock/schemas';
 import { showDate } from '@/services/time';
 
+/** Null where the reader may not. */
 export interface LotDeeds {
   onAccept: Action<AcceptLot, void> | null;
+  /** Takes a block off again. */
+  onUnblock: Action<AcceptLot, void> | null;
   onBlock: Action<BlockLot, { waiting: number }> | null;
 }
 
@@ -24,7 +27,7 @@ const states: Record<LotState, { word: string; tone: 'pine' | 'dashed' | 'crimso
 };
 
 /** Lots of a part with their bins, and what may be done with each. */
-export function LotList({ part, onAccept, onBlock }: { part: StoredPart } & LotDeeds) {
+export function LotList({ part, ...deeds }: { part: StoredPart } & LotDeeds) {
   const lots = part.lots.filter((lot) => lot.onHand > 0 || lot.state !== 'accepted');
   if (lots.length === 0) return <p className="mt-2 text-caption">No lot of it is in the store.</p>;
   const bins = lots.flatMap((lot) => lot.bins.map((bin) => bin.code));
@@ -37,16 +40,17 @@ export function LotList({ part, onAccept, onBlock }: { part: StoredPart } & LotD
     >
       <ul>
         {lots.map((lot) => (
-          <LotRow key={lot.id} lot={lot} part={part} onAccept={onAccept} onBlock={onBlock} />
+          <LotRow key={lot.id} lot={lot} part={part} {...deeds} />
         ))}
       </ul>
     </Disclosure>
   );
 }
 
-function LotRow({ lot, part, onAccept, onBlock }: { lot: StoredLot; part: StoredPart } & LotDeeds) {
+function LotRow({ lot, part, onAccept, onUnblock, onBlock }: { lot: StoredLot; part: StoredPart } & LotDeeds) {
   const [asking, setAsking] = useState<'accept' | 'block' | null>(null);
   const { word, tone } = states[lot.state];
+  const accept = lot.state === 'quarantine' ? onAccept : lot.state === 'blocked' ? onUnblock : null;
   return (
     <li className="flex flex-wrap items-center gap-x-5 gap-y-2 border-t border-rule py-3">
       <div className="min-w-52 flex-1">
@@ -62,7 +66,7 @@ function LotRow({ lot, part, onAccept, onBlock }: { lot: StoredLot; part: Stored
           ? 'Empty'
           : lot.bins.map((bin) => `${bin.code}: ${sayQuantity(bin.onHand, part.unit)}`).join(', ')}
       </p>
-      {onAccept && lot.state === 'quarantine' && (
+      {accept && (
         <Button size="floor" onClick={() => setAsking('accept')}>
           Accept {lot.code}
         </Button>
@@ -72,13 +76,13 @@ function LotRow({ lot, part, onAccept, onBlock }: { lot: StoredLot; part: Stored
           Block {lot.code}
         </Button>
       )}
-      {asking === 'accept' && onAccept && (
+      {asking === 'accept' && accept && (
         <Reasoned
           title={`Accept lot ${lot.code}?`}
           body={`${sayQuantity(lot.onHand, part.unit)} of ${part.name} can then be promised and packed.`}
           label="What was looked at"
           answer={`Accept ${lot.code}`}
-          onSend={(reason) => onAccept({ lotId: lot.id, reason })}
+          onSend={(reason) => accept({ lotId: lot.id, reason })}
           onClose={() => setAsking(null)}
         />
       )}

@@ -59,6 +59,7 @@ export default async function StorePage({ searchParams }: { searchParams: Search
               key={part.id}
               part={part}
               onAccept={can(actor, 'stock.receive') ? accept : null}
+              onUnblock={can(actor, 'stock.block') ? accept : null}
               onBlock={can(actor, 'stock.block') ? block : null}
             />
           ))}

@@ -65,12 +65,16 @@ const stock = (id: string) => reading()('part_stock').where({ part_id: id }).fir
 const asStripe = <T>(change: Parameters<typeof write<T>>[1]) => write<T>({ kind: 'system', name: 'stripe' }, change);
 
 describe('receiving a lot', () => {
-  it('adds a movement, a balance and, once it is accepted, stock that can be promised', async () => {
+  it('adds stock that can be promised once it is accepted, and a checker alone takes a block off again', async () => {
     const { former } = await setParts();
     const { lotId } = await lotOf(packer, former, 40, { accepted: false });
     expect(await left(former.id)).toBe(0);
     await acceptLot(packer, { lotId, reason: 'Twelve pieces measured' });
     expect(await left(former.id)).toBe(40);
+    await blockLot(checker, { lotId, reason: 'Two are cracked' });
+    expect(await left(former.id)).toBe(0);
+    await expect(acceptLot(packer, { lotId, reason: 'Looks well' })).rejects.toMatchObject({ kind: 'forbidden' });
+    await acceptLot(checker, { lotId, reason: 'The cracked ones are out' });
     const part = (await readStore(packer)).parts.find((one) => one.id === former.id);
     expect(part).toMatchObject({ onHand: 40, accepted: 40, available: 40 });
     expect(part?.lots[0]).toMatchObject({ state: 'accepted', onHand: 40 });

@@ -50,7 +50,7 @@ export default async function OrderPage({ params, searchParams }: Props) {
       {order.fulfilment !== 'cancelled' && <OrderTimeline order={order} />}
       <div className="mt-8 grid items-start gap-x-10 gap-y-8 border-t-2 border-ink pt-6 md:grid-cols-2 lg:grid-cols-[1fr_1fr_23.75rem]">
         <OrderBoxes order={order} keyQuery={keyQuery} />
-        <BeforeItComes order={order} />
+        {order.fulfilment !== 'cancelled' && <BeforeItComes order={order} />}
         <OrderActions order={order} orderRef={ref} onPay={pay} onCancel={cancelIt} onClaim={claimIt} />
       </div>
       <OrderSums order={order} />
