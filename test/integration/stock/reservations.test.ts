@@ -1,6 +1,6 @@
 import { beforeAll, describe, expect, it } from 'vitest';
 import { type Actor, visitor } from '@/services/access';
-import { newId } from '@/services/ids';
+import { LotId, newId } from '@/services/ids';
 import { Problem } from '@/services/problem';
 import { now, reading, setClock, write } from '@/services/record';
 import {
@@ -19,6 +19,7 @@ import {
 import { blockLot, placeOrder, changeBasket, readOrder } from '@/services/orders';
 import { minutes } from '@/services/time';
 import { testDatabase } from '../../builders/database';
+import { ledgerFaults } from '../../builders/ledger';
 import {
   type BuiltKit,
   type SetParts,
@@ -221,6 +222,25 @@ describe('picking', () => {
     await blockLot(checker, { lotId: other.lotId, reason: 'Two of five are deaf' });
     await expect(write(packer, (tx) => pick(tx, { ...input, lotId: other.lotId }))).rejects.toThrow('blocked');
     expect(await stock(parts.earphone.id)).toEqual({ accepted: 2, reserved: 0, allocated: 2 });
+  });
+
+  it('what is put back into a lot that was blocked meanwhile can be neither promised nor packed', async () => {
+    const { of, parts } = await stocked(2);
+    const { orderId } = await order(of);
+    await asStripe((tx) => allocate(tx, orderId));
+    const [lot] = await suggestLots(reading(), parts.detector.id, 1);
+    const { lotId = '', binId = '' } = lot ?? {};
+    const input = { orderId, partId: parts.detector.id, lotId, binId, quantity: 1, document: 'box' };
+    await write(packer, (tx) => pick(tx, input));
+    await blockLot(checker, { lotId: LotId.parse(lotId), reason: 'Leaky' });
+    await write(packer, (tx) => putBack(tx, input));
+    expect(await stock(parts.detector.id)).toEqual({ accepted: 0, reserved: 0, allocated: 0 });
+    expect(await ledgerFaults(reading())).toEqual([]);
+    await lotOf(packer, parts.detector, 1);
+    const [fresh] = await suggestLots(reading(), parts.detector.id, 1);
+    await write(packer, (tx) => pick(tx, { ...input, lotId: fresh?.lotId ?? '', binId: fresh?.binId ?? '' }));
+    expect(await stock(parts.detector.id)).toEqual({ accepted: 0, reserved: 0, allocated: 0 });
+    expect(await ledgerFaults(reading())).toEqual([]);
   });
 
   it('a cut length comes from one reel that holds all of it', async () => {
