@@ -5,12 +5,12 @@ import { NavLink } from './nav-link';
 import { PersonMenu } from './person-menu';
 import type { Door } from './rooms';
 
-/** The bottom dock of the floor rooms: targets for gloves, always in the same place. */
+/** The bottom dock of the floor rooms: targets for gloves, always in the same place. The page scrolls above it, never under. */
 export function Dock({ label, doors, actor }: { label: string; doors: readonly Door[]; actor: Actor }) {
   const open = doors.filter((door) => can(actor, door.deed));
   const all = open.map((door) => door.href);
   return (
-    <nav aria-label={label} className="ground-deep sticky bottom-0 z-20 flex h-dock">
+    <nav aria-label={label} className="ground-deep z-20 flex h-dock shrink-0">
       {open.map((door) => (
         <NavLink
           key={door.href}

@@ -7,9 +7,9 @@ import { SkipLink } from '@/components/shell/skip-link';
 /** Floor density, light whatever the system says: tablets stand under lamps. */
 export default async function StoreLayout({ children }: { children: ReactNode }) {
   return (
-    <div data-theme="light" className="flex min-h-dvh flex-col text-floor">
+    <div data-theme="light" className="flex h-dvh flex-col text-floor">
       <SkipLink />
-      <div className="flex-1">{children}</div>
+      <div className="min-h-0 flex-1 overflow-y-auto">{children}</div>
       <Dock label="Store" doors={storeDoors} actor={await enter('stock.read')} />
     </div>
   );
