@@ -148,7 +148,7 @@ function Bench({ view, mayEdit, deeds }: WorkbenchProps) {
         <section
           aria-label="Parts and circuit"
           tabIndex={-1}
-          className={`${pane === 'parts' ? '' : 'hidden'} min-w-0 px-4 py-4 sm:px-6 md:block md:overflow-y-auto md:border-r md:border-rule`}
+          className={`${pane === 'parts' ? '' : 'hidden'} relative min-w-0 px-4 py-4 sm:px-6 md:block md:overflow-y-auto md:border-r md:border-rule`}
         >
           <div className="grid gap-4">
             {problem && (
@@ -178,7 +178,7 @@ function Bench({ view, mayEdit, deeds }: WorkbenchProps) {
         <section
           aria-label="Verdict"
           tabIndex={0}
-          className={`${pane === 'verdict' ? '' : 'hidden'} min-w-0 bg-card px-4 py-4 outline-offset-[-4px] sm:px-6 md:block md:overflow-y-auto`}
+          className={`${pane === 'verdict' ? '' : 'hidden'} relative min-w-0 bg-card px-4 py-4 outline-offset-[-4px] sm:px-6 md:block md:overflow-y-auto`}
         >
           <VerdictPane
             content={content}

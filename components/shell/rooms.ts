@@ -42,6 +42,7 @@ export const storeDoors: readonly Door[] = [
 export const deskDoors: readonly Door[] = [
   { href: '/desk', label: 'Today', icon: 'calendar', deed: 'desk.read' },
   { href: '/desk/orders', label: 'Orders', icon: 'list', deed: 'order.list' },
+  { href: '/desk/kits', label: 'Kits and prices', icon: 'kits', deed: 'price.set' },
   { href: '/desk/people', label: 'People', icon: 'user', deed: 'person.list' },
   { href: '/desk/changes', label: 'Record of changes', icon: 'book', deed: 'record.read' },
 ];

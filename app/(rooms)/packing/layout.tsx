@@ -9,7 +9,7 @@ export default async function PackingLayout({ children }: { children: ReactNode 
   return (
     <div data-theme="light" className="flex h-dvh flex-col text-floor">
       <SkipLink />
-      <div className="min-h-0 flex-1 overflow-y-auto">{children}</div>
+      <div className="relative min-h-0 flex-1 overflow-y-auto">{children}</div>
       <Dock label="Packing" doors={packingDoors} actor={await enter('box.trace')} />
     </div>
   );
