@@ -16,7 +16,7 @@ export default async function CataloguePage({ searchParams }: { searchParams: Se
   const asked = (await searchParams)['q'];
   const q = typeof asked === 'string' ? asked.trim().slice(0, 80) : '';
   const { kits } = await view((actor) => listOnSale(actor, { q }));
-  const newest = kits.find((kit) => kit.prices.length > 0) ?? kits[0];
+  const newest = kits.find((kit) => kit.prices.length > 0 && kit.ready > 0) ?? kits[0];
   const front = newest && q === '' ? await view((actor) => readKitPage(actor, newest.code)) : null;
   return (
     <main id="main">

@@ -68,7 +68,7 @@ export function BuyBox({ name, versionId, prices, ready, onPut }: BuyBoxProps) {
           pending={isSending}
           pendingLabel="Putting it in"
           lockedReason={locked}
-          reasonSide="below"
+          reasonSide="hidden"
           onClick={put}
         >
           Put in basket
