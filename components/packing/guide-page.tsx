@@ -1,3 +1,5 @@
+'use client'; // Drawn whole: parts of a server-drawn picture that stream in later come in an inline style, which the CSP drops.
+
 import type { ReactNode } from 'react';
 import { ReachRail } from '@/components/charts/reach-rail';
 import { Plate } from '@/components/devices/plate';

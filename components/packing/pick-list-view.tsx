@@ -1,3 +1,5 @@
+'use client'; // Drawn whole: parts of a server-drawn picture that stream in later come in an inline style, which the CSP drops.
+
 import { Empty } from '@/components/ui/empty';
 import { LinkButton } from '@/components/ui/link-button';
 import { Notice } from '@/components/ui/notice';
