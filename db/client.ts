@@ -7,6 +7,8 @@ import SqliteTransaction from 'knex/lib/dialects/sqlite3/execution/sqlite-transa
 
 /** What is used of the driver's connection. */
 interface Connection {
+  inTransaction: boolean;
+  exec(sql: string): unknown;
   pragma(text: string): unknown;
 }
 
@@ -15,7 +17,9 @@ interface Connection {
  * when somebody committed in between, whatever the timeout. Nested transactions stay savepoints.
  */
 class ImmediateTransaction extends SqliteTransaction {
-  override begin(connection: unknown): Promise<unknown> {
+  override begin(connection: Connection): Promise<unknown> {
+    // A commit that failed, for want of disk space say, leaves its transaction open on the pooled connection.
+    if (connection.inTransaction) connection.exec('ROLLBACK');
     return this.query(connection, 'BEGIN IMMEDIATE;');
   }
 }

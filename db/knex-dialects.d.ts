@@ -9,7 +9,8 @@ declare module 'knex/lib/dialects/sqlite3/execution/sqlite-transaction.js' {
   import type { Knex } from 'knex';
   interface Internals {
     query(connection: unknown, sql: string): Promise<unknown>;
-    begin(connection: unknown): Promise<unknown>;
+    // `never`: each driver hands in a connection of its own kind.
+    begin(connection: never): Promise<unknown>;
   }
   const SqliteTransaction: new (...args: unknown[]) => Internals & Knex.Transaction;
   export default SqliteTransaction;

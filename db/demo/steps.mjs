@@ -8,6 +8,8 @@ import { fileURLToPath } from 'node:url';
 
 export const root = fileURLToPath(new URL('../..', import.meta.url));
 
+const dist = process.env.COILYARD_DIST ?? '.next';
+
 export const say = (sentence) => console.log(`\n== ${sentence}`);
 
 export class Stop extends Error {}
@@ -70,11 +72,12 @@ const settings = [
   'package-lock.json',
   'proxy.ts',
   'instrumentation.ts',
+  'instrumentation-client.ts',
 ];
 
 export function build() {
   const sources = [...built.flatMap((folder) => [...filesUnder(folder)]), ...settings].sort();
-  once('.next/coilyard-built', hashOf(...sources), () => {
+  once(`${dist}/coilyard-built`, hashOf(...sources), () => {
     if (!run('Building the product (about a minute)', 'npm', ['run', '--silent', 'build'])) {
       throw new Stop('The build failed; what it said stands above.');
     }
@@ -209,7 +212,7 @@ export async function startProduct({ environment, payPort, smtpPort, mailPort, o
         '--silent',
       ],
     ]);
-    const web = start('The product', process.execPath, [join(root, '.next/standalone/server.js')]);
+    const web = start('The product', process.execPath, [join(root, dist, 'standalone/server.js')]);
     start('The worker', ...tsxArgs('services/worker/main.ts'));
     await answers(`http://127.0.0.1:${payPort}/`, pay, 'The payment stand-in');
     await answers(`http://127.0.0.1:${mailPort}/`, mail, 'The mail stand-in');
