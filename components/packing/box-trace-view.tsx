@@ -26,7 +26,7 @@ const rowsOf = (line: Line): Row[] =>
 export function BoxTraceView({ trace }: { trace: TraceView }) {
   const name = `${trace.plate.kitNumber} ${trace.plate.letter}`;
   return (
-    <div className="grid gap-8">
+    <div className="grid grid-cols-[minmax(0,1fr)] gap-8">
       <section className="grid gap-4">
         <div className="flex flex-wrap items-center gap-4">
           <Plate kit={trace.plate.kitNumber} version={trace.plate.letter} size="floor" />

@@ -19,7 +19,7 @@ export interface DispatchListProps {
 /** Packed orders waiting for the carrier, each with its label and the form that sends it; then what has left. */
 export function DispatchList({ dispatch, mayShip, onShip }: DispatchListProps) {
   return (
-    <div className="grid gap-8">
+    <div className="grid grid-cols-[minmax(0,1fr)] gap-8">
       <div className="flex flex-wrap items-end gap-x-6">
         <h1 className="font-display text-page">Dispatch</h1>
         <p className="pb-2">

@@ -16,7 +16,7 @@ import { PartPicture } from './part-picture';
 export function GuidePage({ guide, pdf }: { guide: GuideView; pdf: string }) {
   const { plate } = guide;
   return (
-    <main id="main" className="mx-auto grid max-w-page gap-12 px-4 py-8 sm:px-8">
+    <main id="main" className="mx-auto grid max-w-page grid-cols-[minmax(0,1fr)] gap-12 px-4 py-8 sm:px-8">
       <header className="grid gap-3">
         <div className="flex flex-wrap items-center gap-4">
           <Plate kit={plate.number} version={plate.letter} />

@@ -11,7 +11,7 @@ const walks = [1, 5, 10, 20];
 /** One walk along the bins: at each stop what to take, of which lot, and which boxes it is for. */
 export function PickListView({ list }: { list: PickList }) {
   return (
-    <div className="grid gap-6">
+    <div className="grid grid-cols-[minmax(0,1fr)] gap-6">
       <div className="flex flex-wrap items-end gap-x-6 gap-y-3">
         <h1 className="font-display text-page">Pick list</h1>
         <p className="pb-2">
@@ -19,7 +19,7 @@ export function PickListView({ list }: { list: PickList }) {
             ? 'No box waits.'
             : `${list.stops.length} bins for ${list.boxes.length === 1 ? 'one box' : `${list.boxes.length} boxes`}${list.more > 0 ? `; ${list.more} more wait` : ''}.`}
         </p>
-        <nav aria-label="How many boxes" className="ml-auto flex gap-3">
+        <nav aria-label="How many boxes" className="flex flex-wrap gap-3 sm:ml-auto">
           {walks.map((count) => (
             <LinkButton
               key={count}

@@ -30,7 +30,7 @@ export function TrayView({ box, onPutBack }: TrayViewProps) {
   }, [box.nextLineId]);
 
   return (
-    <section ref={tray} aria-label="Tray" className="min-h-0 overflow-y-auto p-4 sm:p-5">
+    <section ref={tray} aria-label="Tray" tabIndex={0} className="min-h-0 overflow-y-auto p-4 sm:p-5">
       <Tray label="Places of the tray" className={classes('min-h-full', isCrowded && 'lg:grid-cols-5')}>
         {box.places.map((place) => (
           <TrayPlace
