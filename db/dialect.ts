@@ -78,10 +78,6 @@ export async function uniqueWhere(
   await sql.raw(`create unique index ${name} on ${table} (${columns.join(', ')}) where ${where}`);
 }
 
-export async function dropTriggers(sql: Knex, names: readonly string[]): Promise<void> {
-  for (const name of names) await sql.raw(`drop trigger if exists ${name}`);
-}
-
 /** "accepted - reserved - allocated" as one comparable value of a row. */
 export const difference = (sql: Knex, from: string, ...less: readonly string[]): Knex.Raw =>
   sql.raw(['??', ...less.map(() => '??')].join(' - '), [from, ...less]);

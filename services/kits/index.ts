@@ -1,5 +1,5 @@
 import 'server-only';
-export { type BenchKit, type BenchVersion, type VerdictSummary, listVersions, summaryOf } from './bench-list';
+export { type BenchKit, type BenchVersion, type VerdictSummary, listVersions } from './bench-list';
 export { createKit } from './create-kit';
 export { JUDGED, evaluateApart } from './evaluate-apart';
 export { evaluateDesign } from './evaluate-design';

@@ -4,7 +4,7 @@ export { boxesOfOrder } from './boxes-of-order';
 export { claimBox } from './claim-box';
 export { closeBox } from './close-box';
 export { readDispatch } from './dispatch';
-export { makeBoxesFor, prepareBoxes } from './make-boxes';
+export { prepareBoxes } from './make-boxes';
 export { markPrinted } from './mark-printed';
 export { readPickList } from './pick-list';
 export { putBack } from './put-back';

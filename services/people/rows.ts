@@ -114,10 +114,7 @@ export async function changeAndEndSessions(
   personId: string,
   change: { password_hash?: string; totp_secret?: string; totp_step?: number; disabled_at?: Instant | null } = {},
 ): Promise<void> {
-  await sql('people')
-    .where({ id: personId })
-    .update(change)
-    .increment('session_version', 1);
+  await sql('people').where({ id: personId }).update(change).increment('session_version', 1);
 }
 
 export async function removePassword(sql: Knex, personId: string): Promise<void> {

@@ -22,7 +22,7 @@ export const measure = 182 * mm;
 export const black = '#111111';
 export const grey = '#333333';
 export const hair = '#999999';
-export const wash = '#f1f1f1';
+const wash = '#f1f1f1';
 
 /** The Greek face fills in Ω, μ and π, which the others lack. */
 const text = ['Atkinson', 'Greek'];

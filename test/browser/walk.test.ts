@@ -217,7 +217,10 @@ describe.sequential('from a choice of parts to a traceable box', () => {
       .getByText(/^Y-\d+$/)
       .first()
       .waitFor();
-    await page.getByText(/^Paid(, now)?$/).first().waitFor();
+    await page
+      .getByText(/^Paid(, now)?$/)
+      .first()
+      .waitFor();
     await look(customer, 'order-paid');
     const letter = await letterTo(guest.email);
     expect(letter.text).toContain(kit.name);
