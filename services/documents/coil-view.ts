@@ -3,7 +3,7 @@ import type { Verdict } from '../receiver';
 import { valuesAt } from '../kits/rules';
 import type { VersionContent } from '../kits/schemas';
 import { refused } from '../problem';
-import { printable } from './part-names';
+import { printable } from './rules';
 import type { Gate, GuideView, PrintWinding } from './schemas';
 
 /** A hand-wound coil of the right wire reads within this share of the computed resistance; a meter's leads add the rest. */

@@ -8,7 +8,8 @@ import { showDate } from '../time';
 import { circuitView } from './circuit-view';
 import { coilView } from './coil-view';
 import { faultsOf } from './faults';
-import { guidePart, printable } from './part-names';
+import { guidePart } from './part-names';
+import { printable } from './rules';
 import type { GuideStepView, GuideView, PrintReach } from './schemas';
 import { contactOf, sellerLine } from './seller-line';
 

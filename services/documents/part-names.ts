@@ -3,13 +3,8 @@ import { amountText, familyOfPart } from '../packing/rules';
 import type { PartValues } from '../parts/schemas';
 import { showCapacitance, showResistance } from '../quantity';
 import { capacitorCode, resistorBands } from './markings';
+import { printable } from './rules';
 import type { GuidePart } from './schemas';
-
-/**
- * Narrow no-break blanks and other signs that the printed faces do not hold would be set in a face that is not
- * embedded; a plain no-break blank says the same.
- */
-export const printable = (text: string) => text.replace(/[\u2009\u202f]/g, '\u00a0').replace(/\u00b5/g, '\u03bc');
 
 /** How to recognise a part that carries a code, so that a 10 pF marked 100 is not taken for 100 pF. */
 export function markingOf(values: PartValues): string {

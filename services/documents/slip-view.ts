@@ -3,7 +3,7 @@ import { countPieces, familyOfPart } from '../packing/rules';
 import type { Contour, Verdict } from '../receiver';
 import { type Instant, showClock, showDate } from '../time';
 import { reachOf } from './guide-view';
-import { printable } from './part-names';
+import { printable } from './rules';
 import type { LabelView, SlipView } from './schemas';
 import { contactOf, sellerLine } from './seller-line';
 

@@ -2,6 +2,7 @@ import { Page, Text, View } from '@react-pdf/renderer';
 import { formatMoney } from '@/services/money';
 import type { PaperSize } from '@/services/documents/schemas';
 import type { Invoice } from '@/services/orders/schemas';
+import { printable } from '@/services/documents/rules';
 import { addressLines } from '@/services/packing/rules';
 import { showDate } from '@/services/time';
 import { Papers, black, hair, measure, sheetOf, type } from './sheet';
@@ -29,7 +30,7 @@ export function InvoicePaper({ view, size }: { view: Invoice; size: PaperSize })
             <Text style={{ ...type.plate, fontSize: 14 }}>{view.seller.name}</Text>
             {view.seller.lines.map((line, index) => (
               <Text key={index} style={type.body}>
-                {line}
+                {printable(line)}
               </Text>
             ))}
             <Text style={type.small}>{view.seller.country}</Text>
@@ -42,7 +43,7 @@ export function InvoicePaper({ view, size }: { view: Invoice; size: PaperSize })
             <Text style={head}>Bill to</Text>
             {[view.buyer.name, ...addressLines(view.buyer.address)].map((line, index) => (
               <Text key={index} style={{ ...type.body, fontSize: 12 }}>
-                {line}
+                {printable(line)}
               </Text>
             ))}
             <Text style={{ ...type.small, marginTop: 2 }}>{view.buyer.email}</Text>
@@ -67,7 +68,7 @@ export function InvoicePaper({ view, size }: { view: Invoice; size: PaperSize })
             style={{ flexDirection: 'row', borderBottomWidth: 0.75, borderColor: hair, paddingVertical: 7 }}
           >
             <Text style={{ ...type.strong, width: name }}>
-              {line.name}, receiver kit, version {line.letter}
+              {printable(line.name)}, receiver kit, version {line.letter}
             </Text>
             <Text style={{ ...type.figures, ...right, width: columns.quantity }}>{line.quantity}</Text>
             <Text style={{ ...type.figures, ...right, width: columns.unit }}>{formatMoney(line.unit)}</Text>

@@ -22,12 +22,11 @@ export const measure = 182 * mm;
 export const black = '#111111';
 export const grey = '#333333';
 export const hair = '#999999';
-const wash = '#f1f1f1';
 
-/** The Greek face fills in Ω, μ and π, which the others lack. */
-const text = ['Atkinson', 'Greek'];
-const figures = ['Martian', 'Greek'];
-const display = ['Besley', 'Atkinson', 'Greek'];
+/** The extended face fills in the letters of names such as Łódź, the Greek one Ω, μ and π. */
+const text = ['Atkinson', 'AtkinsonExt', 'Greek'];
+const figures = ['Martian', 'AtkinsonExt', 'Greek'];
+const display = ['Besley', 'Atkinson', 'AtkinsonExt', 'Greek'];
 
 export const type = StyleSheet.create({
   body: { fontFamily: text, fontSize: 11, lineHeight: 1.4, color: black },

@@ -129,6 +129,15 @@ describe('packing slip', () => {
   });
 });
 
+it('a name with letters of other Latin alphabets is printed from faces in the file', async () => {
+  const { orderId: abroad } = await paidOrder(kit, 1, { name: 'Łucja Ďurková-Győry' });
+  await prepareBoxes(packer);
+  const row = await reading()('boxes').where('order_id', abroad).first<{ id: string }>('id');
+  const slip = await printed('slip', 'a4', row?.id ?? '');
+  expect(slip.text).toContain('Łucja Ďurková-Győry');
+  for (const font of slip.fonts) expect(font, font).toMatch(/ yes yes yes +\d/);
+});
+
 describe('build guide', () => {
   it('says everything that the version says, cautions before parts before steps', async () => {
     const { inOrder, text } = await printed('guide');
