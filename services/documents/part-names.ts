@@ -42,7 +42,8 @@ export function valueOf(values: PartValues): string {
   }
 }
 
-const figure = (text: string) => printable(text).split('\u00a0')[0] ?? text;
+/** The number without its unit, where the unit follows once for a range. */
+const figure = (text: string) => printable(text).split(/[\u00a0\u202f]/)[0] ?? text;
 
 export function guidePart(line: FrozenLine): GuidePart | null {
   if (!line.part) return null;

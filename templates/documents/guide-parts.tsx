@@ -26,7 +26,7 @@ export function GuideParts({ view, size }: GuideProps) {
         <Text style={{ ...head, width: columns.yours, textAlign: 'center' }}>Yours</Text>
       </View>
       {view.parts.map((part) => (
-        <PartRow key={part.reference} part={part} height={37 * give(size)} />
+        <PartRow key={part.reference} part={part} height={rowHeight(view.parts.length) * give(size)} />
       ))}
       <View
         wrap={false}
@@ -42,6 +42,9 @@ export function GuideParts({ view, size }: GuideProps) {
     </Sheet>
   );
 }
+
+/** Up to sixteen parts and the tools stand on one sheet. */
+const rowHeight = (parts: number) => (parts > 12 ? 32 : 37);
 
 function PartRow({ part, height }: { part: GuidePart; height: number }) {
   const recognise = [part.marking, part.note].filter((text) => text !== '').join('; ');

@@ -3,7 +3,7 @@ import type { PaperSize, SlipView } from '@/services/documents/schemas';
 import { PartPicture } from './part-picture';
 import { QrCode } from './qr';
 import { Rail } from './rail';
-import { Papers, Plate, TickBox, black, grey, hair, measure, mm, sheetOf, type } from './sheet';
+import { Papers, Plate, TickBox, black, give, grey, hair, measure, mm, sheetOf, type } from './sheet';
 
 const columns = { picture: 46, line: 62, bin: 58, pieces: 46, scanned: 54, yours: 40 };
 
@@ -25,7 +25,7 @@ export function SlipPaper({ view, size }: { view: SlipView; size: PaperSize }) {
         <Contents view={view} height={rowHeight(view.lines.length, size)} />
         <View wrap={false} style={{ marginTop: 10 }}>
           <Text style={type.strong}>What this version tunes at worst case</Text>
-          <Rail reach={view.reach} />
+          <Rail reach={view.reach} width={measure * give(size)} />
         </View>
         <Foot view={view} />
         <PageFoot view={view} side={sheet.side} foot={sheet.foot} />
@@ -98,7 +98,8 @@ function Fact({ label, lines, width }: { label: string; lines: readonly string[]
 }
 
 /** Sixteen lines stand on one sheet; a longer list runs on with its head repeated. */
-const rowHeight = (lines: number, size: PaperSize) => (lines > 10 ? 24.5 : 30) - (size === 'letter' ? 3 : 0);
+const rowHeight = (lines: number, size: PaperSize) =>
+  (lines > 13 ? 21.5 : lines > 10 ? 24.5 : 30) - (size === 'letter' ? (lines > 13 ? 2 : 3) : 0);
 
 function Contents({ view, height }: { view: SlipView; height: number }) {
   const name = measure - Object.values(columns).reduce((sum, width) => sum + width, 0);
