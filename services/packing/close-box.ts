@@ -4,7 +4,8 @@ import { parse, refuseIfAny, refused } from '../problem';
 import { record, write } from '../record';
 import { blockersOf, boxView } from './box-view';
 import { boxInHands } from './in-hands';
-import { hasOpenBoxes, inBox, linesOf, moveOrder, setClosed } from './rows';
+import { inBox } from './lot-rows';
+import { hasOpenBoxes, linesOf, moveOrder, setClosed } from './rows';
 import { weighing } from './mass';
 import { type BoxView, CloseBox } from './schemas';
 

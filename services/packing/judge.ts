@@ -1,6 +1,7 @@
 import type { Knex } from 'knex';
 import { frozenContent } from '../kits';
-import { type BoxLineRow, type BoxRow, type LotOfPart, type LotRow, findLot, findPart, linesOf, lotsOf } from './rows';
+import { type LotOfPart, type LotRow, findLot, findPart, lotsOf } from './lot-rows';
+import { type BoxLineRow, type BoxRow, linesOf } from './rows';
 import { amountText, isIn, lowerFirst, suggest, versionName } from './rules';
 import { isSerial, looksLikeSerial, readGuideCode, shortHash } from './serial';
 

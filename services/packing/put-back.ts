@@ -4,7 +4,8 @@ import { record, write } from '../record';
 import { putBack as returnToBin } from '../stock';
 import { boxView } from './box-view';
 import { boxInHands } from './in-hands';
-import { inBox, insertPick, keepClaim, linesOf, setPacked } from './rows';
+import { inBox } from './lot-rows';
+import { insertPick, keepClaim, linesOf, setPacked } from './rows';
 import { lowerFirst } from './rules';
 import { type BoxView, PutBack } from './schemas';
 

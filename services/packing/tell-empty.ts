@@ -3,7 +3,8 @@ import { parse, refused } from '../problem';
 import { record, write } from '../record';
 import { boxView } from './box-view';
 import { boxInHands } from './in-hands';
-import { linesOf, lotsOf, markToldEmpty } from './rows';
+import { lotsOf } from './lot-rows';
+import { linesOf, markToldEmpty } from './rows';
 import { isIn, lowerFirst, suggest } from './rules';
 import { type BoxView, TellEmpty } from './schemas';
 

@@ -5,7 +5,8 @@ import { frozenContent } from '../kits';
 import { missing, Problem } from '../problem';
 import { reading } from '../record';
 import { plateOf } from './box-view';
-import { type BoxRow, boxes, findBoxBySerial, findLot, linesOf, storedAddress } from './rows';
+import { findLot } from './lot-rows';
+import { type BoxRow, boxes, findBoxBySerial, linesOf, storedAddress } from './rows';
 import { amountText } from './rules';
 import type { LotTrace, TraceView } from './schemas';
 
