@@ -19,7 +19,9 @@ function tests(what, project) {
   const report = join(root, 'test/artefacts', `${project}.json`);
   rmSync(report, { force: true });
   const args = ['run', '--project', project, '--reporter=default', '--reporter=json', `--outputFile.json=${report}`];
-  const ok = run(what, bin('vitest'), args, { env: { ...process.env, COILYARD_LONG: isLong ? '1' : '0' } });
+  const ok = run(what, bin('vitest'), args, {
+    env: { ...process.env, ...(isLong && { SCHEDULES: '10000', YARDS: '600' }) },
+  });
   if (!existsSync(report)) {
     failed += 1;
     return;

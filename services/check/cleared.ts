@@ -147,7 +147,7 @@ const rules: readonly Rule[] = [
     title: 'Guide follows the parts',
     says: (_verdict, { guide }) => ({
       text: 'Every line is named in a step, and every caution stands.',
-      figure: `${guide.steps.length} steps`,
+      figure: guide.steps.length === 1 ? '1 step' : `${guide.steps.length} steps`,
     }),
   },
 ];
