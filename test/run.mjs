@@ -19,6 +19,8 @@ function tests(what, project) {
   const report = join(root, 'test/artefacts', `${project}.json`);
   rmSync(report, { force: true });
   const args = ['run', '--project', project, '--reporter=default', '--reporter=json', `--outputFile.json=${report}`];
+  // Long schedules take minutes in one test.
+  if (isLong) args.push('--testTimeout=3600000');
   const ok = run(what, bin('vitest'), args, {
     env: { ...process.env, ...(isLong && { SCHEDULES: '10000', YARDS: '600' }) },
   });
