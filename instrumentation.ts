@@ -13,9 +13,15 @@ export async function register(): Promise<void> {
   }
 }
 
-/** A page that broke: the number its reader sees, and where; no query, which may hold a link's secret. */
+/** A path as the log may keep it: no query, and nothing as long as the secret of a link. */
+export const withoutSecrets = (path: string): string => (path.split('?')[0] ?? '').replace(/[\w-]{40,}/g, '(secret)');
+
+/** A page that broke: the number its reader sees, and where. */
 export const onRequestError: Instrumentation.onRequestError = async (error, request, context) => {
   const { log } = await import('./services/log');
   const digest = typeof error === 'object' && error !== null && 'digest' in error ? error.digest : undefined;
-  log().error({ errorId: digest, error, path: request.path.split('?')[0], route: context.routePath }, 'a page failed');
+  log().error(
+    { errorId: digest, error, path: withoutSecrets(request.path), route: context.routePath },
+    'a page failed',
+  );
 };

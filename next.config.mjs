@@ -1,3 +1,8 @@
+const ofOwnOrigin = [
+  { key: 'X-Content-Type-Options', value: 'nosniff' },
+  { key: 'Cross-Origin-Resource-Policy', value: 'same-origin' },
+];
+
 /** @type {import('next').NextConfig} */
 const config = {
   // A second build beside the first: the tests' own, or another person's at the same time.
@@ -11,13 +16,14 @@ const config = {
   images: { unoptimized: true },
   poweredByHeader: false,
   productionBrowserSourceMaps: false,
-  // What proxy.ts does not pass: the build's own files.
+  // What proxy.ts does not pass: the build's own files and the webhook.
   headers: () => [
+    { source: '/_next/static/:path*', headers: ofOwnOrigin },
     {
-      source: '/_next/static/:path*',
+      source: '/api/stripe',
       headers: [
-        { key: 'X-Content-Type-Options', value: 'nosniff' },
-        { key: 'Cross-Origin-Resource-Policy', value: 'same-origin' },
+        ...ofOwnOrigin,
+        { key: 'Content-Security-Policy', value: "default-src 'none'; frame-ancestors 'none'" },
       ],
     },
   ],

@@ -24,8 +24,11 @@ export function proxy(request: NextRequest): NextResponse {
   return response;
 }
 
-/** All but the webhook, whose body must reach its handler untouched, and the build's own files. */
-export const config = { matcher: ['/((?!api/stripe|_next/static|_next/image).*)'] };
+/**
+ * All but the webhook, whose body must reach its handler untouched, and the build's own files; `next.config.mjs` gives
+ * those their headers.
+ */
+export const config = { matcher: ['/((?!api/stripe$|_next/static/).*)'] };
 
 const fixedHeaders = {
   'X-Content-Type-Options': 'nosniff',

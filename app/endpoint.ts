@@ -1,6 +1,6 @@
 import type { Actor } from '@/services/access';
 import { currentActor } from '@/services/people';
-import { Problem, type ProblemKind, invalid } from '@/services/problem';
+import { Problem, type ProblemKind, invalid, tooLarge } from '@/services/problem';
 import { problemOf } from './problem-of';
 import { refuseForeign } from './own-request';
 
@@ -35,6 +35,7 @@ const titles: Record<ProblemKind, string> = {
   forbidden: 'Not with these roles',
   missing: 'Not here',
   conflict: 'Changed meanwhile',
+  'too-large': 'Too much at once',
   busy: 'Busy just now',
   unavailable: 'Not available just now',
 };
@@ -72,7 +73,7 @@ export async function jsonBody(request: Request, limit = bodyLimit): Promise<unk
 }
 
 export async function limitedText(request: Request, limit: number): Promise<string> {
-  const tooLong = () => invalid(`The body is longer than ${limit} bytes. Send less at once.`);
+  const tooLong = () => tooLarge(`The body is longer than ${limit} bytes. Send less at once.`);
   if (Number(request.headers.get('content-length') ?? 0) > limit) throw tooLong();
   if (!request.body) return '';
   const decoder = new TextDecoder();

@@ -14,7 +14,8 @@ export async function view<T>(read: (actor: Actor) => Promise<T>): Promise<T> {
     return await read(actor);
   } catch (error) {
     if (!(error instanceof Problem)) throw error;
-    if (error.kind === 'missing') notFound();
+    // An address with an id or a page of a list that cannot be leads nowhere, as one that is not there.
+    if (error.kind === 'missing' || error.kind === 'invalid') notFound();
     if (error.kind !== 'forbidden') throw error;
     if (actor.kind === 'visitor') redirect(`/sign-in?next=${encodeURIComponent(await path())}`);
     forbidden();

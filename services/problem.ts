@@ -1,6 +1,7 @@
 import type { z } from 'zod';
 
-export type ProblemKind = 'invalid' | 'refused' | 'forbidden' | 'missing' | 'conflict' | 'busy' | 'unavailable';
+export type ProblemKind =
+  'invalid' | 'refused' | 'forbidden' | 'missing' | 'conflict' | 'too-large' | 'busy' | 'unavailable';
 
 /** Sentences by field path ("lines.0.quantity"), for the form that sent it. */
 export type FieldSentences = Record<string, string>;
@@ -22,6 +23,7 @@ const status: Record<ProblemKind, number> = {
   forbidden: 403,
   missing: 404,
   conflict: 409,
+  'too-large': 413,
   busy: 503,
   unavailable: 503,
 };
@@ -58,6 +60,7 @@ export const invalid = (sentence: string, fields?: FieldSentences) =>
   new Problem('invalid', sentence, fields ? { fields } : {});
 export const refused = (sentence: string) => new Problem('refused', sentence);
 export const forbidden = (sentence: string) => new Problem('forbidden', sentence);
+export const tooLarge = (sentence: string) => new Problem('too-large', sentence);
 export const missing = (sentence: string) => new Problem('missing', sentence);
 export const conflict = (sentence: string, current: unknown) => new Problem('conflict', sentence, { current });
 

@@ -1,3 +1,4 @@
+import { limitedText } from '@/app/endpoint';
 import { log } from '@/services/log';
 import { receiveEvent } from '@/services/payments';
 import { Problem } from '@/services/problem';
@@ -9,13 +10,13 @@ const mostBytes = 512 * 1024;
 
 /** The provider's events. The raw text is read first: a body that was parsed and printed again has no signature. */
 export async function POST(request: Request): Promise<Response> {
-  if (Number(request.headers.get('content-length') ?? 0) > mostBytes) return answer(413);
-  const body = await request.text();
   try {
+    const body = await limitedText(request, mostBytes);
     await receiveEvent(body, request.headers.get('stripe-signature'));
     return answer(200);
   } catch (error) {
-    if (error instanceof Problem && error.kind === 'invalid') return answer(400);
+    if (error instanceof Problem && (error.kind === 'invalid' || error.kind === 'too-large'))
+      return answer(error.status);
     // Anything else is sent again by the provider until it is taken.
     log().error({ error: String(error) }, 'an event was not taken');
     return answer(error instanceof Problem && error.kind === 'busy' ? 503 : 500);

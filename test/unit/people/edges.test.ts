@@ -3,8 +3,10 @@ import { beforeAll, describe, expect, it } from 'vitest';
 import { limitedText, problemResponse } from '@/app/endpoint';
 import { refuseForeign } from '@/app/own-request';
 import { TooSoon } from '@/services/people/attempts';
-import { invalid, missing, refused } from '@/services/problem';
-import { proxy } from '@/proxy';
+import { forbidden, invalid, missing, refused, tooLarge } from '@/services/problem';
+import { config, proxy } from '@/proxy';
+import { POST as event } from '@/app/api/stripe/route';
+import { GET as unknown } from '@/app/api/[...path]/route';
 
 beforeAll(() => {
   Object.assign(process.env, {
@@ -97,6 +99,8 @@ describe('a problem on the wire', () => {
     [invalid('Two fields.', { name: 'Write the name.' }), 400],
     [refused('Two stops stand.'), 409],
     [missing('Not here.'), 404],
+    [forbidden('Not with these roles.'), 403],
+    [tooLarge('Send less at once.'), 413],
   ])('says %s with its own status', async (problem, status) => {
     const response = problemResponse(problem);
     expect(response.status).toBe(status);
@@ -126,4 +130,22 @@ it('a body is read no further than its limit, whatever length it claims', async 
   await expect(limitedText(new Request('https://yard.example/x', init), 5000)).rejects.toThrow(/longer than 5000/);
   const small = new Request('https://yard.example/x', { method: 'POST', body: 'güt' });
   expect(await limitedText(small, 5000)).toBe('güt');
+});
+
+it('an event of the payment provider is read no further than its limit', async () => {
+  const long = new Request('https://yard.example/api/stripe', { method: 'POST', body: 'x'.repeat(600_000) });
+  expect((await event(long)).status).toBe(413);
+});
+
+it('an address of the API that is not there is a problem too', async () => {
+  const answer = unknown();
+  expect([answer.status, answer.headers.get('content-type')]).toEqual([404, 'application/problem+json']);
+});
+
+it('every address but the webhook and the build’s own files passes by the headers', () => {
+  const passes = (path: string) => config.matcher.some((pattern) => new RegExp(`^${pattern}$`).test(path));
+  expect(['/', '/desk', '/api/v1/parts', '/api/stripes', '/api/stripe/x', '/_next/image', '/_next/staticx']).toSatisfy(
+    (paths: string[]) => paths.every(passes),
+  );
+  expect(['/api/stripe', '/_next/static/chunks/a.js'].filter(passes)).toEqual([]);
 });
