@@ -29,19 +29,19 @@ export interface PaymentAttempt {
 /**
  * Step: opens the next try to pay, or the last one again if the provider never answered it, so that the same key asks
  * for the same page. Sets stock aside anew where the reservation has lapsed, which may be refused.
- * @param afresh the last try is known to be over
+ * @param over the try that is known to be over, if one is; somebody who comes second gets the page that the first opened
  */
 export async function openAttempt(
   tx: Tx,
   actor: Actor,
   ref: OrderRef,
-  options: { afresh: boolean },
+  { over }: { over: number | null },
 ): Promise<PaymentAttempt> {
   const order = await openOrder(tx.sql, actor, 'order.pay', ref);
   if (!mayPay(order)) throw refused(whyNot(order));
   const live = await liveReservation(tx.sql, order.id);
-  const isUnanswered = order.sessionAttempt > 0 && order.sessionId === null;
-  if (isUnanswered && !options.afresh && live && live.expiresAt > tx.now) {
+  const isUnderWay = order.sessionAttempt > 0 && order.sessionAttempt !== over;
+  if (isUnderWay && live && live.expiresAt > tx.now) {
     return describe(tx, order, order.sessionAttempt, live.expiresAt);
   }
   const keptUntil = tx.now + reservedFor;
@@ -98,13 +98,14 @@ async function needsOfOrder(tx: Tx, orderId: string): Promise<Map<string, number
   return needs;
 }
 
-/** Step: notes the payment page that the provider opened for a try. */
+/** Step: notes the payment page that the provider opened for a try; false when the order has moved on meanwhile. */
 export async function noteSession(
   tx: Tx,
   noted: { orderId: string; attempt: number; sessionId: string },
-): Promise<void> {
-  await tx
+): Promise<boolean> {
+  const changed = await tx
     .sql('orders')
     .where({ id: noted.orderId, session_attempt: noted.attempt, payment: 'awaiting-payment' })
     .update({ session_id: noted.sessionId });
+  return changed === 1;
 }

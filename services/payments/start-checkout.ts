@@ -1,6 +1,7 @@
 import Stripe from 'stripe';
 import type { Actor } from '../access';
 import { type PaymentAttempt, noteSession, openAttempt, openOrder } from '../orders';
+import { log } from '../log';
 import { OrderRef } from '../orders/schemas';
 import { Problem, parse, refused } from '../problem';
 import { reading, write } from '../record';
@@ -17,21 +18,32 @@ export async function startCheckout(actor: Actor, input: OrderRef): Promise<{ ur
   const open = order.payment === 'awaiting-payment' && order.sessionId ? await stillOpen(order.sessionId) : null;
   if (open) return { url: open };
 
-  let attempt = await begin(actor, ref, order.sessionId !== null);
+  let attempt = await begin(actor, ref, order.sessionId === null ? null : order.sessionAttempt);
   let session = await ask(attempt);
   if (session === 'refused') {
-    attempt = await begin(actor, ref, true);
+    attempt = await begin(actor, ref, attempt.attempt);
     session = await ask(attempt);
   }
   if (session === 'refused') throw unavailable();
   const { orderId, attempt: number } = attempt;
   const { id: sessionId, url } = session;
-  await write(actor, (tx) => noteSession(tx, { orderId, attempt: number, sessionId }));
-  return { url };
+  if (await write(actor, (tx) => noteSession(tx, { orderId, attempt: number, sessionId }))) return { url };
+  // Nobody may pay on a page of an order that was cancelled or paid while the provider made it.
+  await closePage(sessionId);
+  throw refused('This order has just changed. Read it again, then decide.');
 }
 
-function begin(actor: Actor, ref: OrderRef, afresh: boolean): Promise<PaymentAttempt> {
-  return write(actor, (tx) => openAttempt(tx, actor, ref, { afresh }));
+function begin(actor: Actor, ref: OrderRef, over: number | null): Promise<PaymentAttempt> {
+  return write(actor, (tx) => openAttempt(tx, actor, ref, { over }));
+}
+
+async function closePage(sessionId: string): Promise<void> {
+  await stripe()
+    .checkout.sessions.expire(sessionId)
+    .catch((error: unknown) => {
+      // It may be closed or paid already; what comes in for it is put before a person.
+      log().warn({ error }, 'a payment page that nobody should use was not closed');
+    });
 }
 
 /** Only a definite answer lets a new key be used; after silence the same key has to be asked again. */

@@ -7,7 +7,7 @@ import { type Actor, systemActor, visitor } from '@/services/access';
 import { newId } from '@/services/ids';
 import { changeBasket, lapseReservations, placeOrder, readOrder } from '@/services/orders';
 import { cancelOrder, receiveEvent, reconcile, startCheckout, useStripe } from '@/services/payments';
-import { apiVersion } from '@/services/payments/client';
+import { apiVersion, stripe } from '@/services/payments/client';
 import { now, reading, setClock } from '@/services/record';
 import { minutes } from '@/services/time';
 import { startFakeStripe, type FakeStripe } from '../../fakes/stripe/start';
@@ -113,6 +113,29 @@ describe('paying an order', () => {
     await pay(ref);
     await expect(startCheckout(visitor, ref)).rejects.toThrow('paid already');
     expect(await reading()('order_money').where({ order_id: ref.orderId })).toHaveLength(1);
+  });
+
+  it('two browsers that come back to a closed page at once are sent to one new page, not to two', async () => {
+    const ref = await order();
+    const { url } = await startCheckout(visitor, ref);
+    await stripe().checkout.sessions.expire(sessionOf(url));
+    await fake.settled();
+    const pages = await Promise.all([1, 2, 3].map(() => startCheckout(visitor, ref)));
+    expect(new Set(pages.map((page) => page.url)).size).toBe(1);
+    expect(pages[0]?.url).not.toBe(url);
+    expect(sessionsMade()).toBeGreaterThan(1);
+  });
+
+  it('an order cancelled while its page is being made gets no page that anybody could pay on', async () => {
+    const ref = await order();
+    fake.set({ apiDelayMs: 300 });
+    const starting = startCheckout(visitor, ref).catch((error: unknown) => error);
+    await new Promise((resolve) => setTimeout(resolve, 100));
+    await cancelOrder(visitor, ref);
+    fake.set({ apiDelayMs: 0 });
+    expect(await starting).toMatchObject({ kind: 'refused' });
+    const pages = await stripe().checkout.sessions.list();
+    expect(pages.data.map((page) => page.status)).toEqual(['expired']);
   });
 
   it('somebody else cannot pay or see it, and learns nothing of it', async () => {
