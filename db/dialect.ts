@@ -48,6 +48,13 @@ export async function freezeColumns(
   );
 }
 
+/** Refuses new rows that do not meet a condition on them. */
+export async function refuseInserts(sql: Knex, table: string, when: string, sentence: string): Promise<void> {
+  await sql.raw(
+    `create trigger ${table}_begins before insert on ${table} when ${when} begin select raise(abort, '${sentence}'); end`,
+  );
+}
+
 /** Refuses any change of rows that belong to a parent whose condition holds ("old" and "new" both looked at). */
 export async function freezeChildren(
   sql: Knex,

@@ -1,5 +1,5 @@
 import type { Knex } from 'knex';
-import { createTable, freezeChildren, freezeColumns, makeAppendOnly, uniqueWhere } from '../dialect';
+import { createTable, freezeChildren, freezeColumns, makeAppendOnly, refuseInserts, uniqueWhere } from '../dialect';
 
 const frozenColumns = [
   'kit_id',
@@ -122,6 +122,7 @@ export async function up(sql: Knex): Promise<void> {
   });
   await makeAppendOnly(sql, 'sign_offs');
   await uniqueWhere(sql, 'sign_offs', 'one_release_a_version', ['version_id'], "decision = 'released'");
+  await refuseInserts(sql, 'versions', "new.state <> 'draft'", 'a version begins as a draft');
   await freezeColumns(
     sql,
     'versions',

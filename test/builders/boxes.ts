@@ -6,6 +6,7 @@ import { orderKey } from '@/services/orders';
 import { partKinds, type PartValues, type Place } from '@/services/parts/schemas';
 import { canonicalJson, now, reading, sha256, write } from '@/services/record';
 import { allocate, needsOf, reserve } from '@/services/stock';
+import { type Decided, insertDecided } from './decided-version';
 import { type BuiltPart, lotOf, part, staff } from './orders';
 
 const exact = (nominal: number) => ({ nominal, origin: 'measured' as const });
@@ -276,7 +277,7 @@ export async function millrace(options: MillraceOptions = {}): Promise<Millrace>
   return { ...(await insertVersion(content, state)), parts };
 }
 
-async function insertVersion(content: VersionContent, state: string): Promise<Omit<Millrace, 'parts'>> {
+async function insertVersion(content: VersionContent, state: Decided): Promise<Omit<Millrace, 'parts'>> {
   const { code, number, name } = content.kit;
   const designer = await staff('Isolde Hark', 'designer');
   const checker = await staff('Walter Tarrow', 'checker');
@@ -301,37 +302,27 @@ async function insertVersion(content: VersionContent, state: string): Promise<Om
   const versionId = VersionId.parse(newId());
   const contentHash = sha256(canonicalJson(content));
   const { verdict } = evaluateContent(content, { boxes: 400, seed: 1 });
-  await reading()('versions').insert({
-    id: versionId,
-    kit_id: kitId,
-    letter: content.letter,
+  await insertDecided(
+    {
+      id: versionId,
+      kit_id: kitId,
+      letter: content.letter,
+      based_on_id: null,
+      circuit: JSON.stringify(content.circuit),
+      guide: JSON.stringify(content.guide),
+      save_no: 1,
+      created_by: designer.id,
+      created_at: at,
+      updated_at: at,
+      content: canonicalJson(content),
+      content_hash: contentHash,
+      sent_by: designer.id,
+      sent_at: at,
+      verdict: canonicalJson(verdict),
+    },
     state,
-    based_on_id: null,
-    circuit: JSON.stringify(content.circuit),
-    guide: JSON.stringify(content.guide),
-    save_no: 1,
-    created_by: designer.id,
-    created_at: at,
-    updated_at: at,
-    content: canonicalJson(content),
-    content_hash: contentHash,
-    sent_by: designer.id,
-    sent_at: at,
-    verdict: canonicalJson(verdict),
-  });
-  await reading()('sign_offs').insert({
-    id: newId(),
-    version_id: versionId,
-    decision: 'released',
-    person_id: checker.id,
-    at,
-    content_hash: contentHash,
-    engine_version: verdict.engine,
-    rules_version: verdict.rules.version,
-    verdict: canonicalJson(verdict),
-    reasons: '{}',
-    remark: 'Tried on one build.',
-  });
+    { person_id: checker.id, engine_version: verdict.engine, rules_version: verdict.rules.version },
+  );
   return { kitId, versionId, code, letter: content.letter, content, contentHash };
 }
 

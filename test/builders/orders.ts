@@ -6,6 +6,7 @@ import { CautionCode, type VersionContent, type FrozenLine } from '@/services/ki
 import { designOf } from '@/services/kits/rules';
 import { evaluate } from '@/services/receiver';
 import { receiveLot } from '@/services/stock';
+import { type Decided, insertDecided } from './decided-version';
 
 let count = 0;
 const next = () => ++count;
@@ -125,7 +126,7 @@ export interface KitOptions {
   code?: string;
   number?: number;
   letter?: string;
-  state?: 'in-check' | 'held' | 'released' | 'withdrawn';
+  state?: Decided;
   parts?: SetParts;
   /** In pence, tax included; null leaves the kit without a price. */
   price?: number | null;
@@ -160,39 +161,27 @@ export async function kit(options: KitOptions = {}): Promise<BuiltKit> {
       created_at: at,
     });
   }
-  await reading()('versions').insert({
-    id: versionId,
-    kit_id: kitId,
-    letter,
-    state,
-    based_on_id: null,
-    circuit: JSON.stringify(content.circuit),
-    guide: JSON.stringify(content.guide),
-    save_no: 1,
-    created_by: designer.id,
-    created_at: at,
-    updated_at: at,
-    content: canonicalJson(content),
-    content_hash: contentHash,
-    sent_by: designer.id,
-    sent_at: at,
-    verdict,
-  });
-  if (state === 'released' || state === 'withdrawn') {
-    await reading()('sign_offs').insert({
-      id: newId(),
-      version_id: versionId,
-      decision: 'released',
-      person_id: checker.id,
-      at,
+  await insertDecided(
+    {
+      id: versionId,
+      kit_id: kitId,
+      letter,
+      based_on_id: null,
+      circuit: JSON.stringify(content.circuit),
+      guide: JSON.stringify(content.guide),
+      save_no: 1,
+      created_by: designer.id,
+      created_at: at,
+      updated_at: at,
+      content: canonicalJson(content),
       content_hash: contentHash,
-      engine_version: '1',
-      rules_version: '1',
+      sent_by: designer.id,
+      sent_at: at,
       verdict,
-      reasons: '{}',
-      remark: 'Tried on one build.',
-    });
-  }
+    },
+    state,
+    { person_id: checker.id, engine_version: '1', rules_version: '1' },
+  );
   const price = options.price === undefined ? 3800 : options.price;
   if (price !== null && !options.kitId) await priceStep(kitId, 1, price);
   return { kitId, versionId, code, number, name, letter, content, contentHash };

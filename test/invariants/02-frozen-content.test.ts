@@ -3,6 +3,7 @@ import { readSheet, release, sendToCheck } from '@/services/check';
 import { addLine, frozenContent, removeLine, saveCircuit, saveGuide, saveLine } from '@/services/kits';
 import { findingKey, notesIn } from '@/services/kits/rules';
 import type { VersionView } from '@/services/kits/schemas';
+import { newId } from '@/services/ids';
 import { canonicalJson, sha256 } from '@/services/record';
 import { testDatabase } from '../builders/database';
 import { problemOf } from '../builders/problems';
@@ -87,6 +88,12 @@ describe('a released version', () => {
     await expect(signOffs.clone().update({ content_hash: 'b'.repeat(64) })).rejects.toThrow('append-only');
     await expect(signOffs.clone().delete()).rejects.toThrow('append-only');
     await expect(db.sql('versions').where({ id: released.id }).delete()).rejects.toThrow();
+  });
+
+  it('is not written by SQL beside the check room', async () => {
+    const row = await db.sql('versions').where({ id: released.id }).first();
+    const forged = { ...row, id: newId(), letter: 'Z' };
+    await expect(db.sql('versions').insert(forged)).rejects.toThrow('begins as a draft');
   });
 
   it('is neither sold nor printed when its text was changed behind the triggers', async () => {
