@@ -88,6 +88,8 @@ export async function readSheet(actor: Actor, id: string): Promise<Sheet> {
   const versionId = VersionId.safeParse(id);
   if (!versionId.success) throw missing('There is no such version. Look for it in the queue.');
   const sql = reading();
+  const row = await sql('versions').where({ id: versionId.data }).first<{ state: string } | undefined>('state');
+  if (row?.state === 'draft') throw missing('This version is a draft, so there is nothing to check yet.');
   const frozen = await readFrozen(sql, versionId.data);
   const evaluation = await evaluateApart(frozen.content, { ...JUDGED, withContour: true });
   const view = await readVersion(actor, versionId.data);

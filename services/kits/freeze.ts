@@ -2,7 +2,7 @@ import { type Tx, canonicalJson, sha256 } from '../record';
 import { personIdOf } from '../access';
 import type { VersionId } from '../ids';
 import type { VersionContent } from './schemas';
-import { contentOf, getDraft, getKit, getVersion, linesOf } from './rows';
+import { contentOf, getDraft, getKit, getVersion, linesOf, noteEditor } from './rows';
 import type { Knex } from 'knex';
 
 /** A draft's content as it stands, with the number of its last save and the codes of retired parts in it. */
@@ -37,7 +37,10 @@ export async function freezeVersion(
       sent_at: tx.now,
       verdict: canonicalJson(frozen.verdict),
     });
-  return changed === 1 ? { contentHash } : null;
+  if (changed !== 1) return null;
+  // Whoever sends it stands for it: such a person is told how it was judged, and does not judge it.
+  await noteEditor(tx, frozen.versionId);
+  return { contentHash };
 }
 
 /** Takes a version that nobody has judged back to draft. */

@@ -1,5 +1,5 @@
 import { beforeAll, describe, expect, it } from 'vitest';
-import { readSheet, release, sendToCheck } from '@/services/check';
+import { hold, readSheet, release, sendToCheck } from '@/services/check';
 import { readVersion, saveGuide, startVersion } from '@/services/kits';
 import { findingKey, notesIn, stopsIn } from '@/services/kits/rules';
 import { CautionCode } from '@/services/kits/schemas';
@@ -96,6 +96,16 @@ describe('own work', () => {
     await sendToCheck(isolde, { versionId: view.id, basedOn: back.saveNo });
     const { asked } = await signed(view.id);
     expect((await problemOf(release(everything, asked))).kind).toBe('forbidden');
+  });
+
+  it('is not judged by who sent it to check, even without having drawn a line of it', async () => {
+    const { view } = await aVersion().saved(isolde);
+    await sendToCheck(everything, { versionId: view.id, basedOn: view.saveNo });
+    const { asked } = await signed(view.id);
+    expect((await problemOf(release(everything, asked))).kind).toBe('forbidden');
+    const remark = 'The low end is out of reach.';
+    const held = hold(everything, { versionId: view.id, contentHash: asked.contentHash, remark });
+    expect((await problemOf(held)).kind).toBe('forbidden');
   });
 
   it('stays own work in a version that somebody else starts from it', async () => {

@@ -164,6 +164,11 @@ describe('the check sheet', () => {
   });
 });
 
+it('a draft has no check sheet yet', async () => {
+  const { view } = await aVersion().saved(isolde);
+  expect((await problemOf(readSheet(walter, view.id))).kind).toBe('missing');
+});
+
 describe('holding', () => {
   it('sends the version back with its findings; the next version shows them and what it did about them', async () => {
     const { view, kitId } = await sent(aVersion().withTurns(40));
