@@ -22,10 +22,18 @@ export async function blockLot(actor: Actor, input: BlockLot): Promise<{ waiting
     const { unallocated } = await takeOut(tx, lot);
     for (const orderId of unallocated) {
       const order = await rows.getOrder(tx.sql, orderId);
-      const waits = fulfilmentMayBecome(order.fulfilment, 'backordered');
-      if (waits) await rows.moveOrder(tx.sql, order, { fulfilment: 'backordered' });
-      if (waits) await tellOfShortage(tx, orderId);
-      else await rows.lookAt(tx.sql, orderId, `Lot ${lot.code} was blocked while this order was being packed.`);
+      if (!fulfilmentMayBecome(order.fulfilment, 'backordered')) {
+        await rows.lookAt(tx.sql, orderId, `Lot ${lot.code} was blocked while this order was being packed.`);
+        continue;
+      }
+      await rows.moveOrder(tx.sql, order, { fulfilment: 'backordered' });
+      await tellOfShortage(tx, orderId);
+      await record(tx, 'order.backordered', {
+        subject: { kind: 'order', id: orderId },
+        before: { fulfilment: order.fulfilment },
+        after: { fulfilment: 'backordered' },
+        reason: `lot ${lot.code} was blocked`,
+      });
     }
     await record(tx, 'lot.blocked', {
       subject: { kind: 'lot', id: lotId },

@@ -37,7 +37,9 @@ export async function settleRefunds(tx: Tx, orderId: string): Promise<void> {
   const order = await rows.getOrder(tx.sql, orderId);
   const { paidMinor, refundedMinor } = await rows.moneyOf(tx.sql, orderId);
   const isPaid = order.payment === 'paid' || order.payment === 'part-refunded';
-  const payment = paymentAfter(Math.min(paidMinor, order.total.minor), refundedMinor);
+  // What was paid beyond the total goes back first: who paid twice and got one payment back has paid.
+  const beyond = Math.max(0, paidMinor - order.total.minor);
+  const payment = paymentAfter(paidMinor - beyond, Math.max(0, refundedMinor - beyond));
   if (!isPaid || payment === order.payment || payment === 'awaiting-payment') return;
 
   const stops = payment === 'refunded' && fulfilmentMayBecome(order.fulfilment, 'cancelled');

@@ -17,19 +17,21 @@ export interface PaidSession {
 
 /**
  * Books a payment that the provider reports. The order becomes paid, its stock is allocated, its invoice numbered and
- * its mail queued: each once, whatever the number and order of reports. What does not fit our own row is booked as far
- * as money moved, and put before a person.
+ * its mail queued: each once, whatever the number and order of reports. What does not fit our own row is not booked: it
+ * stands in the record and is put before a person.
  */
 export async function markPaid(tx: Tx, { orderId, reference, amount }: PaidSession): Promise<void> {
   must(tx.actor, 'order.mark-paid');
   const order = await rows.findOrder(tx.sql, orderId);
   if (!order) return;
   if (amount.minor !== order.total.minor || amount.currency !== order.total.currency) {
-    await rows.lookAt(
+    const isNews = await rows.lookAt(
       tx.sql,
       orderId,
       `A payment of ${formatMoney(amount)} came in, but the order is for ${formatMoney(order.total)}. Compare ${reference} with the provider's list.`,
     );
+    const subject = { kind: 'order', id: orderId };
+    if (isNews) await record(tx, 'order.paid-otherwise', { subject, after: { reference, amount } });
     return;
   }
   if (!(await rows.bookMoney(tx.sql, { id: newId(), orderId, kind: 'paid', amount, reference, at: tx.now }))) return;

@@ -148,16 +148,17 @@ export async function moveOrder(
   return changed === 1;
 }
 
-/** Adds a sentence for whoever has to look at the order; the same one is not added twice. */
-export async function lookAt(sql: Knex.Transaction, orderId: string, sentence: string): Promise<void> {
+/** Adds a sentence for whoever has to look at the order; false when it stands there already. */
+export async function lookAt(sql: Knex.Transaction, orderId: string, sentence: string): Promise<boolean> {
   const row = await sql('orders')
     .where({ id: orderId })
     .select({ said: 'look_at_it' })
     .first<{ said: string } | undefined>();
-  if (!row || row.said.includes(sentence)) return;
+  if (!row || row.said.includes(sentence)) return false;
   await sql('orders')
     .where({ id: orderId })
     .update({ look_at_it: `${row.said} ${sentence}`.trim() });
+  return true;
 }
 
 export async function moneyOf(sql: Knex, orderId: string): Promise<{ paidMinor: number; refundedMinor: number }> {
@@ -216,6 +217,12 @@ export async function taxRate(sql: Knex, country: string): Promise<number> {
     .select({ rate: 'basis_points' })
     .first<{ rate: number } | undefined>();
   return row?.rate ?? 0;
+}
+
+export async function taxRates(sql: Knex): Promise<{ country: string; basisPoints: number }[]> {
+  return sql('tax_rates')
+    .orderBy('country')
+    .select<{ country: string; basisPoints: number }[]>({ country: 'country', basisPoints: 'basis_points' });
 }
 
 export interface StoredDelivery {

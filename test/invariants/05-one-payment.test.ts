@@ -158,6 +158,9 @@ describe('one paid checkout', () => {
       const outcome = await outcomeOf(orderId);
       expect(outcome).toMatchObject({ payment: 'awaiting-payment', paidRows: 0, invoices: 0, mails: [] });
       expect(outcome.look_at_it).toContain('Compare');
+      await deliver(event('checkout.session.completed', session({ orderId, amount, ...wrong })));
+      const lines = await reading()('changes').where({ subject_id: orderId, action: 'order.paid-otherwise' });
+      expect(lines).toHaveLength(1);
     }
     const stranger = event('checkout.session.completed', session({ orderId: newId(), amount: 4250 }));
     await expect(deliver(stranger)).resolves.toEqual({ received: true });
@@ -171,5 +174,16 @@ describe('one paid checkout', () => {
     expect(outcome).toMatchObject({ payment: 'paid', fulfilment: 'allocated', paidRows: 2, invoices: 1 });
     expect(outcome.mails).toHaveLength(1);
     expect(outcome.look_at_it).toContain('second time');
+
+    const second = { ...charge({ orderId, amount, refunded: amount }), id: 'ch_second', payment_intent: 'pi_second' };
+    await deliver(event('charge.refunded', second));
+    expect(await outcomeOf(orderId)).toMatchObject({
+      payment: 'paid',
+      fulfilment: 'allocated',
+      refunded: amount,
+      live: ['allocated'],
+    });
+    await deliver(event('charge.refunded', charge({ orderId, amount, refunded: amount })));
+    expect(await outcomeOf(orderId)).toMatchObject({ payment: 'refunded', fulfilment: 'cancelled', live: [] });
   });
 });
