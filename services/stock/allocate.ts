@@ -21,9 +21,9 @@ export async function allocate(tx: Tx, orderId: string): Promise<Allocation> {
     }
     return 'allocated';
   }
+  if (await rows.usedReservation(tx.sql, orderId)) return 'allocated';
   const last = await rows.lastReservation(tx.sql, orderId);
   if (!last) return 'backordered';
-  if (last.state === 'used') return 'allocated';
   const needs = await rows.reservationLines(tx.sql, last.id);
   if (!(await isAvailable(tx, needs))) return 'backordered';
   for (const [partId, quantity] of needs) await mustChange(tx, partId, { allocated: quantity });

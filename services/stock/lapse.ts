@@ -17,7 +17,9 @@ export async function release(tx: Tx, reservation: rows.Reservation, to: 'lapsed
   if (state !== 'reserved' && state !== 'allocated') return;
   if (!(await rows.changeReservation(tx.sql, id, state, to))) return;
   for (const [partId, quantity] of await rows.reservationLines(tx.sql, id)) {
-    if (quantity > 0) await rows.changeStock(tx.sql, partId, { [state]: -quantity });
+    if (quantity > 0 && !(await rows.changeStock(tx.sql, partId, { [state]: -quantity }))) {
+      throw new Error(`The sums of part ${partId} do not carry its reservations.`);
+    }
   }
   await record(tx, `stock.${to}`, {
     subject: { kind: 'order', id: reservation.orderId },

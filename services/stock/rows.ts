@@ -155,6 +155,13 @@ export async function lastReservation(sql: Knex, orderId: string): Promise<Reser
     .first<Reservation>(...reservationColumns);
 }
 
+/** The order's allocation when all of it has been picked. */
+export async function usedReservation(sql: Knex, orderId: string): Promise<Reservation | undefined> {
+  return sql('reservations')
+    .where({ order_id: orderId, state: 'used' })
+    .first<Reservation>(...reservationColumns);
+}
+
 export function dueReservations(sql: Knex, now: number): Promise<Reservation[]> {
   return sql('reservations')
     .where({ state: 'reserved' })
@@ -287,8 +294,8 @@ export async function markUsedWhenEmpty(sql: Knex.Transaction, reservationId: st
 export async function reopenAllocation(sql: Knex.Transaction, orderId: string): Promise<string | undefined> {
   const live = await liveReservation(sql, orderId);
   if (live) return live.state === 'allocated' ? live.id : undefined;
-  const last = await lastReservation(sql, orderId);
-  if (last?.state !== 'used') return undefined;
-  await changeReservation(sql, last.id, 'used', 'allocated');
-  return last.id;
+  const used = await usedReservation(sql, orderId);
+  if (!used) return undefined;
+  await changeReservation(sql, used.id, 'used', 'allocated');
+  return used.id;
 }

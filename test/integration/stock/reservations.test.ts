@@ -243,6 +243,31 @@ describe('picking', () => {
     expect(await ledgerFaults(reading())).toEqual([]);
   });
 
+  it('what is put back stays set aside, also for an order that lost its stock once and got it again', async () => {
+    const { of, parts } = await stocked(1);
+    const { orderId } = await order(of);
+    await asStripe((tx) => allocate(tx, orderId));
+    await reading()('orders')
+      .where({ id: orderId })
+      .update({ payment: 'paid', fulfilment: 'allocated', paid_at: now() });
+    const [deaf] = await suggestLots(reading(), parts.earphone.id, 1);
+    await blockLot(checker, { lotId: LotId.parse(deaf?.lotId), reason: 'Deaf' });
+    await lotOf(packer, parts.earphone, 1);
+    expect(await asStripe((tx) => allocate(tx, orderId))).toBe('allocated');
+
+    const takes = [];
+    for (const part of Object.values(parts)) {
+      const quantity = part.values.kind === 'wire' ? 16_000 : 1;
+      const [lot] = await suggestLots(reading(), part.id, quantity);
+      const { lotId = '', binId = '' } = lot ?? {};
+      takes.push({ orderId, partId: part.id, lotId, binId, quantity, document: 'box' });
+    }
+    for (const take of takes) await write(packer, (tx) => pick(tx, take));
+    for (const take of takes) await write(packer, (tx) => putBack(tx, take));
+    expect(await stock(parts.detector.id)).toEqual({ accepted: 1, reserved: 0, allocated: 1 });
+    expect(await ledgerFaults(reading())).toEqual([]);
+  });
+
   it('a cut length comes from one reel that holds all of it', async () => {
     const { wire } = await setParts();
     await lotOf(packer, wire, 9_000);
@@ -275,6 +300,8 @@ describe('blocking a lot', () => {
     expect((await readOrder(visitor, younger)).fulfilment).toBe('backordered');
     expect((await readOrder(visitor, older)).fulfilment).toBe('allocated');
     expect(await stock(parts.detector.id)).toEqual({ accepted: 1, reserved: 0, allocated: 1 });
+    const line = await reading()('changes').where({ subject_id: younger.orderId, action: 'order.backordered' }).first();
+    expect(line).toMatchObject({ actor_name: 'Walter Tarrow', before: '{"fulfilment":"allocated"}' });
     const mails = await reading()('outbox').where('key', 'like', `%${younger.orderId}%`).pluck('key');
     expect(mails).toEqual([`order-backordered:${younger.orderId}`]);
   });
