@@ -1,4 +1,4 @@
-/** ISO 3166-1 alpha-2 codes; names come from the reader's own platform (`Intl.DisplayNames`). */
+/** ISO 3166-1 alpha-2 codes; names come from the server's `Intl.DisplayNames`, since browsers spell some otherwise. */
 const codes =
   'AD AE AF AG AI AL AM AO AQ AR AS AT AU AW AX AZ BA BB BD BE BF BG BH BI BJ BL BM BN BO BQ BR BS BT BV BW BY BZ CA CC CD ' +
   'CF CG CH CI CK CL CM CN CO CR CU CV CW CX CY CZ DE DJ DK DM DO DZ EC EE EG EH ER ES ET FI FJ FK FM FO FR GA GB GD GE GF ' +

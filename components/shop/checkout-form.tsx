@@ -8,7 +8,6 @@ import { Button } from '@/components/ui/button';
 import { TextArea, TextField } from '@/components/ui/field';
 import { RadioGroup } from '@/components/ui/radio-group';
 import { Select } from '@/components/ui/select';
-import { countriesServed } from '@/services/countries';
 import { formatMoney, money, sum } from '@/services/money';
 import { deliveriesTo, postcodeWarning } from '@/services/orders/rules';
 import { type CheckoutView, PlaceOrder, type PlaceOrder as PlaceOrderInput } from '@/services/orders/schemas';
@@ -20,13 +19,14 @@ const Checkout = PlaceOrder.omit({ basketId: true });
 
 export interface CheckoutFormProps {
   checkout: CheckoutView;
+  /** Named on the server: browsers spell some countries otherwise. */
+  countries: readonly { code: string; name: string }[];
   onOrder: Action<CheckoutInput, { url: string }>;
 }
 
 /** Where it goes, how, and to whom. What was typed stays whatever the answer is. */
-export function CheckoutForm({ checkout, onOrder }: CheckoutFormProps) {
+export function CheckoutForm({ checkout, countries, onOrder }: CheckoutFormProps) {
   const { basket, deliveries, known } = checkout;
-  const countries = countriesServed(deliveries.flatMap((method) => method.countries));
   const { form, field, submit, pending, summary, problem } = useActionForm<CheckoutInput, { url: string }>({
     schema: Checkout,
     action: onOrder,

@@ -1,6 +1,7 @@
 import type { Browser } from 'playwright-core';
 import { TOTP } from 'otpauth';
 import { afterAll, beforeAll, describe, expect, inject, test } from 'vitest';
+import { payWith } from './buyer';
 import { type DrawnKit, addLine, setNumber, startKit, writeGuide } from './designer';
 import { letterTo } from './letterbox';
 import { fillTray, paperText, scan } from './packer';
@@ -205,12 +206,12 @@ describe.sequential('from a choice of parts to a traceable box', () => {
     await page.getByRole('button', { name: /^Pay £/ }).click();
 
     await page.waitForURL((url) => url.href.startsWith(inject('payUrl')));
-    await payWith('4000000000000002');
+    await payWith(page, '4000000000000002', guest.name);
     await page
       .getByText(/declined|refused|said no/i)
       .first()
       .waitFor();
-    await payWith('4242424242424242');
+    await payWith(page, '4242424242424242', guest.name);
     await page.waitForURL((url) => url.href.startsWith(inject('url')) && url.pathname.startsWith('/orders/'));
     orderUrl = new URL(page.url()).pathname + new URL(page.url()).search;
     await page
@@ -226,15 +227,6 @@ describe.sequential('from a choice of parts to a traceable box', () => {
     expect(letter.text).toContain(kit.name);
     expect(letter.text).toMatch(/£87\.90|£90\.80/);
   });
-
-  async function payWith(card: string): Promise<void> {
-    const { page } = customer;
-    await page.getByLabel('Card number').fill(card);
-    await page.getByLabel('Good until').fill('12/34');
-    await page.getByLabel('Security code').fill('123');
-    await page.getByLabel('Name on the card').fill(guest.name);
-    await page.getByRole('button', { name: /^Pay / }).click();
-  }
 
   test('a packer packs both boxes part by part and sends them', async () => {
     const orderNumber = /Y-\d+/.exec(await customer.page.locator('main').innerText())?.[0] ?? '';

@@ -4,6 +4,7 @@ import { CheckoutForm } from '@/components/shop/checkout-form';
 import { EmptyBasket } from '@/components/shop/empty-basket';
 import { Breadcrumbs } from '@/components/ui/breadcrumbs';
 import { Empty } from '@/components/ui/empty';
+import { countriesServed } from '@/services/countries';
 import { readCheckout } from '@/services/orders';
 import { order } from '../actions';
 import { basketId } from '../basket-cookie';
@@ -30,7 +31,11 @@ export default async function CheckoutPage() {
           The yard has not said yet how parcels go out. Your basket is kept; come back tomorrow.
         </Empty>
       ) : (
-        <CheckoutForm checkout={checkout} onOrder={order} />
+        <CheckoutForm
+          checkout={checkout}
+          countries={countriesServed(checkout.deliveries.flatMap((method) => method.countries))}
+          onOrder={order}
+        />
       )}
     </main>
   );
