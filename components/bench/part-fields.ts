@@ -1,6 +1,6 @@
 import type { PartKind, PartValues } from '@/services/parts/schemas';
 import type { ShownUnit } from '@/services/quantity';
-import { classWords, lawWords, phoneWords, wallWords } from './part-words';
+import { classWords, drawingWords, lawWords, phoneWords, wallWords } from './part-words';
 
 /** How a kind's values are asked for. The schema of the kind decides what may stand in each. */
 export type PartField =
@@ -62,7 +62,7 @@ const fields: Record<Exclude<PartKind, 'earphone'>, readonly PartField[]> = {
     { type: 'number', key: 'radius', label: 'Radius', unit: 'mm', hint: 'Half its thickness.' },
   ],
   'earth-lead': [{ type: 'number', key: 'length', label: 'Length', unit: 'm' }],
-  hardware: [],
+  hardware: [{ type: 'choice', key: 'drawing', label: 'Drawn as', options: drawingWords }],
   tool: [],
   print: [],
   packaging: [],
@@ -130,6 +130,7 @@ export function firstValues(kind: PartKind): PartValues {
     case 'earth-lead':
       return { kind, length: 3 };
     case 'hardware':
+      return { kind, drawing: 'terminal' };
     case 'tool':
     case 'print':
     case 'packaging':

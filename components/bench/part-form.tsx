@@ -10,12 +10,12 @@ import { Notice } from '@/components/ui/notice';
 import { Panel } from '@/components/ui/panel';
 import { Select } from '@/components/ui/select';
 import { formatMoney, parseMoney } from '@/services/money';
-import { ChangePart, NewPart, PART_KINDS, type PartValues, type PartView, partKinds } from '@/services/parts/schemas';
+import { ChangePart, NewPart, PART_KINDS, PartValues, type PartView, partKinds } from '@/services/parts/schemas';
 import { type FieldSentences, Problem, type ProblemView, parse } from '@/services/problem';
 import { currentPart, PartConflict } from './part-conflict';
 import { PartField, type TypedValues } from './part-field';
 import { fieldsOf, firstEarphone, firstValues } from './part-fields';
-import { KindPicture } from './part-picture';
+import { PartPicture } from './part-picture';
 import { QuantityField } from './quantity-field';
 
 export type PartFormProps =
@@ -192,9 +192,9 @@ export function PartForm(props: PartFormProps) {
           error={errors['cost'] ?? errors['cost.minor']}
         />
       </div>
-      <Panel title="Values" note="SI values with prefixes as you write them." ground="open" level={2}>
+      <Panel title="Values" note="Write them as you say them: 235u, 0.235m, 365p." ground="open" level={2}>
         <div className="mb-3">
-          <KindPicture kind={kind} width={72} />
+          <PartPicture values={pictured(values, kind)} width={72} />
         </div>
         {fieldsOf(asValues(values, kind)).length === 0 && <p>This kind has no electrical or mechanical values.</p>}
         <div className="grid gap-4">
@@ -230,4 +230,10 @@ const idOf = (path: string) => `part-${path.split('.').slice(0, 2).join('-').rep
 function asValues(values: TypedValues, kind: (typeof PART_KINDS)[number]): PartValues {
   if (kind === 'earphone') return firstEarphone(values['earphoneKind'] === 'ceramic' ? 'ceramic' : 'magnetic');
   return firstValues(kind);
+}
+
+/** What the picture beside the values shows: the drawing chosen for hardware, else the kind's own. */
+function pictured(values: TypedValues, kind: (typeof PART_KINDS)[number]): PartValues {
+  const typed = PartValues.safeParse(values);
+  return typed.success ? typed.data : asValues(values, kind);
 }

@@ -97,6 +97,13 @@ export const classWords = {
   mineral: 'mineral',
   'oxide-contact': 'oxide contact',
 } as const;
+export const drawingWords = {
+  terminal: 'terminal',
+  board: 'board',
+  knob: 'knob',
+  screw: 'screw',
+  packet: 'packet of small pieces',
+} as const;
 export const phoneWords = {
   magnetic: 'magnetic',
   armature: 'balanced armature',

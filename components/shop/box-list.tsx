@@ -1,7 +1,8 @@
 import type { BoxItem } from '@/services/catalogue/schemas';
+import { silhouetteOf } from '@/services/parts/schemas';
 import { SvgDrawing } from '@/templates/drawings/as-svg';
 import { partDrawing } from '@/templates/drawings/part-drawing';
-import { familyOf, partDetail } from './words';
+import { partDetail } from './words';
 
 /** What is in the box, part by part, under the references that the guide uses. */
 export function BoxList({ box, letter, number }: { box: readonly BoxItem[]; number: number; letter: string }) {
@@ -14,7 +15,7 @@ export function BoxList({ box, letter, number }: { box: readonly BoxItem[]; numb
         {box.map((item) => (
           <li key={item.reference} className="flex items-center gap-3 border-t border-rule py-2.5">
             <span className="w-8 shrink-0 font-figures text-head text-ink2">{item.reference}</span>
-            <SvgDrawing drawing={partDrawing(familyOf(item.values.kind))} width={50} className="shrink-0" />
+            <SvgDrawing drawing={partDrawing(silhouetteOf(item.values))} width={50} className="shrink-0" />
             <span className="min-w-0 leading-5">
               <b className="block">{item.name}</b>
               <span className="text-caption text-ink2">{partDetail(item)}</span>

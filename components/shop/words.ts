@@ -1,8 +1,6 @@
 import type { BoxItem, KitPage } from '@/services/catalogue/schemas';
 import { showCapacitance, showResistance } from '@/services/quantity';
 import { sayQuantity } from '@/services/stock/rules';
-import { type PartKind, partKinds } from '@/services/parts/schemas';
-import type { PartFamily } from '@/templates/drawings/part-drawing';
 
 const numbers = [
   'No',
@@ -76,6 +74,3 @@ function valueWords(values: BoxItem['values']): string | null {
       return null;
   }
 }
-
-/** The silhouette of a kind of part. */
-export const familyOf = (kind: PartKind): PartFamily => partKinds[kind].silhouette;

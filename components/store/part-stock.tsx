@@ -1,9 +1,8 @@
 import { FigureText } from '@/components/ui/figure-text';
 import { showQuantity } from '@/services/stock/rules';
 import type { StoredPart } from '@/services/stock/schemas';
-import { SvgDrawing } from '@/templates/drawings/as-svg';
-import { partDrawing } from '@/templates/drawings/part-drawing';
-import { type PartUnit, partKinds } from '@/services/parts/schemas';
+import { PartPicture } from '@/components/packing/part-picture';
+import type { PartUnit } from '@/services/parts/schemas';
 import { LotList, type LotDeeds } from './lot-list';
 
 /** One part of the store: how much there is, how much of it is promised, and in which bins it lies. */
@@ -15,7 +14,7 @@ export function PartStock({ part, ...deeds }: { part: StoredPart } & LotDeeds) {
     <li className="border-b border-rule py-4">
       <div className="grid items-center gap-x-6 gap-y-3 md:grid-cols-[minmax(0,1fr)_auto]">
         <div className="flex min-w-0 items-center gap-4">
-          <SvgDrawing drawing={partDrawing(partKinds[part.kind].silhouette)} width={70} className="shrink-0" />
+          <PartPicture family={part.silhouette} width={70} className="shrink-0" />
           <div className="min-w-0">
             <h2 className="font-bold">{part.name}</h2>
             <p className="font-figures text-ink2">{part.code}</p>

@@ -1,4 +1,4 @@
-import type { NewPart, PartValue, PartValues } from '@/services/parts/schemas';
+import type { NewPart, PartValue, PartValues, ValuesOf } from '@/services/parts/schemas';
 
 /** The invented yard's parts. Values are of kinds and sizes usual in the trade (common practice, no source). */
 const pico = 1e-12;
@@ -104,7 +104,7 @@ const resistor = (ohms: number, shown: string): Row => ({
 });
 
 const thing = (
-  kind: 'hardware' | 'tool' | 'print' | 'packaging',
+  values: ValuesOf<'hardware' | 'tool' | 'print' | 'packaging'>,
   code: string,
   name: string,
   grams: number,
@@ -114,7 +114,7 @@ const thing = (
   name,
   grams,
   pence,
-  values: { kind },
+  values,
 });
 
 const detectors: Row[] = [
@@ -291,27 +291,29 @@ const resistances: [number, string][] = [
   [1e6, '1M'],
 ];
 
-const hardware: [string, string, number, number][] = [
-  ['X-TERM', 'Brass terminal with nut', 7.2, 38],
-  ['X-TERMB', 'Brass terminal, black cap', 7.4, 44],
-  ['X-TERMR', 'Brass terminal, red cap', 7.4, 44],
-  ['X-KNOB', 'Knob, 38 mm, with screw', 18, 95],
-  ['X-KNOBS', 'Knob, 25 mm, with screw', 9, 70],
-  ['X-DIAL', 'Dial plate, blank', 12, 60],
-  ['X-SCREW', 'Wood screw, 10 mm', 0.9, 2],
-  ['X-SCREWL', 'Wood screw, 20 mm', 1.6, 3],
-  ['X-BOLT', 'Bolt M3, 12 mm, with nut', 1.1, 4],
+type Drawn = NonNullable<ValuesOf<'hardware'>['drawing']>;
+
+const hardware: [string, string, number, number, Drawn?][] = [
+  ['X-TERM', 'Brass terminal with nut', 7.2, 38, 'terminal'],
+  ['X-TERMB', 'Brass terminal, black cap', 7.4, 44, 'terminal'],
+  ['X-TERMR', 'Brass terminal, red cap', 7.4, 44, 'terminal'],
+  ['X-KNOB', 'Knob, 38 mm, with screw', 18, 95, 'knob'],
+  ['X-KNOBS', 'Knob, 25 mm, with screw', 9, 70, 'knob'],
+  ['X-DIAL', 'Dial plate, blank', 12, 60, 'knob'],
+  ['X-SCREW', 'Wood screw, 10 mm', 0.9, 2, 'screw'],
+  ['X-SCREWL', 'Wood screw, 20 mm', 1.6, 3, 'screw'],
+  ['X-BOLT', 'Bolt M3, 12 mm, with nut', 1.1, 4, 'screw'],
   ['X-WASH', 'Washer M3', 0.31, 1],
-  ['X-BOARD', 'Drilled board, beech, 120 by 180 mm', 210, 260],
-  ['X-BOARDS', 'Drilled board, birch ply, 90 by 140 mm', 88, 150],
-  ['X-BOARDL', 'Drilled board, beech, 160 by 240 mm', 390, 380],
-  ['X-CLIP', 'Spring clip', 3.1, 14],
-  ['X-CROC', 'Crocodile clip, covered', 4.5, 19],
+  ['X-BOARD', 'Drilled board, beech, 120 by 180 mm', 210, 260, 'board'],
+  ['X-BOARDS', 'Drilled board, birch ply, 90 by 140 mm', 88, 150, 'board'],
+  ['X-BOARDL', 'Drilled board, beech, 160 by 240 mm', 390, 380, 'board'],
+  ['X-CLIP', 'Spring clip', 3.1, 14, 'terminal'],
+  ['X-CROC', 'Crocodile clip, covered', 4.5, 19, 'terminal'],
   ['X-LUG', 'Solder lug', 0.4, 3],
   ['X-FOOT', 'Felt foot', 0.6, 4],
   ['X-TAPE', 'Paper tape, 1 m', 1.2, 6],
-  ['X-SPRING', 'Spring terminal strip, 4 way', 11, 85],
-  ['X-SOCK', 'Earphone socket', 5.2, 46],
+  ['X-SPRING', 'Spring terminal strip, 4 way', 11, 85, 'terminal'],
+  ['X-SOCK', 'Earphone socket', 5.2, 46, 'terminal'],
   ['X-BRACK', 'Capacitor bracket', 8.5, 35],
   ['X-INSUL', 'Egg insulator', 32, 55],
   ['X-CORD', 'Halyard cord, 5 m', 24, 70],
@@ -397,10 +399,12 @@ const rows: Row[] = [
   earth('G-30', 'Earth clip and lead, 3 m', 3, 74, 180),
   earth('G-50', 'Earth clip and lead, 5 m', 5, 110, 240),
   earth('G-CP', 'Counterpoise wire, 8 m', 8, 60, 150),
-  ...hardware.map(([code, name, grams, pence]) => thing('hardware', code, name, grams, pence)),
-  ...tools.map(([code, name, grams, pence]) => thing('tool', code, name, grams, pence)),
-  ...packaging.map(([code, name, grams, pence]) => thing('packaging', code, name, grams, pence)),
-  thing('print', 'G-GUIDE', 'Printed build guide', 78, 60),
+  ...hardware.map(([code, name, grams, pence, drawing = 'packet']) =>
+    thing({ kind: 'hardware', drawing }, code, name, grams, pence),
+  ),
+  ...tools.map(([code, name, grams, pence]) => thing({ kind: 'tool' }, code, name, grams, pence)),
+  ...packaging.map(([code, name, grams, pence]) => thing({ kind: 'packaging' }, code, name, grams, pence)),
+  thing({ kind: 'print' }, 'G-GUIDE', 'Printed build guide', 78, 60),
 ];
 
 export const demoParts: NewPart[] = rows.map(({ grams, pence, note, ...row }) => ({

@@ -1,6 +1,6 @@
 import type { FrozenLine } from '../kits/schemas';
-import { amountText, familyOfPart } from '../packing/rules';
-import type { PartValues } from '../parts/schemas';
+import { amountText } from '../packing/rules';
+import { type PartValues, silhouetteOf } from '../parts/schemas';
 import { showCapacitance, showResistance } from '../quantity';
 import { capacitorCode, resistorBands } from './markings';
 import { printable } from './rules';
@@ -52,7 +52,7 @@ export function guidePart(line: FrozenLine): GuidePart | null {
   return {
     reference: line.reference,
     name: printable(part.name),
-    family: familyOfPart(part),
+    family: silhouetteOf(part.values),
     amount: printable(isCut ? amountText(line.quantity, part.unit) : String(line.quantity)),
     marking: markingOf(part.values),
     note: printable(line.note),

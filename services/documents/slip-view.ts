@@ -1,5 +1,6 @@
 import type { BoxPapers } from '../packing';
-import { countPieces, familyOfPart } from '../packing/rules';
+import { countPieces } from '../packing/rules';
+import { silhouetteOf } from '../parts/schemas';
 import type { Contour, Verdict } from '../receiver';
 import { type Instant, showClock, showDate } from '../time';
 import { reachOf } from './guide-view';
@@ -59,7 +60,7 @@ export function slipView(papers: BoxPapers, verdict: Verdict, chance: Contour | 
 
 function familyIn({ content }: BoxPapers, reference: string): string {
   const part = content.lines.find((line) => line.reference === reference)?.part;
-  return part ? familyOfPart(part) : 'packet';
+  return part ? silhouetteOf(part.values) : 'packet';
 }
 
 /** Who packed and when: the last scan while the lid is still open, the lid once it is on. */

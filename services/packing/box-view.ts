@@ -2,11 +2,12 @@ import type { Knex } from 'knex';
 import { type Actor, personIdOf } from '../access';
 import { frozenContent } from '../kits';
 import type { FrozenLine, VersionContent } from '../kits/schemas';
+import { silhouetteOf } from '../parts/schemas';
 import type { Instant } from '../time';
 import { type InBox, type LotOfPart, inBox, lotsOf } from './lot-rows';
 import { type BoxLineRow, type BoxRow, getBox, linesOf } from './rows';
 import { weighing } from './mass';
-import { familyOfPart, amountText, claimLapsed, closeBlockers, countPieces, isIn, suggest, barOf } from './rules';
+import { amountText, claimLapsed, closeBlockers, countPieces, isIn, suggest, barOf } from './rules';
 import type { BoxCard, BoxView, TrayPlace } from './schemas';
 import { guideCode, shortHash } from './serial';
 
@@ -121,7 +122,7 @@ export function trayPlaces(
   });
 }
 
-const familyAt = (line: FrozenLine | undefined) => (line?.part ? familyOfPart(line.part) : 'packet');
+const familyAt = (line: FrozenLine | undefined) => (line?.part ? silhouetteOf(line.part.values) : 'packet');
 
 /** A bin told empty without another lot to go to, or a part with none at all, waits for the store. */
 function stateOf(line: BoxLineRow, hasLot: boolean, nextGiven: boolean): TrayPlace['state'] {

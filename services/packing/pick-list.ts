@@ -1,10 +1,10 @@
 import { type Actor, can, must } from '../access';
 import { reading, now } from '../record';
-import { PartValues } from '../parts/schemas';
+import { PartValues, silhouetteOf } from '../parts/schemas';
 import { prepareBoxes } from './make-boxes';
 import { type LotOfPart, lotsOf } from './lot-rows';
 import { type BoxLineRow, type BoxRow, linesOf } from './rows';
-import { amountText, familyOfPart, isIn } from './rules';
+import { amountText, isIn } from './rules';
 import type { PickList, PickStop } from './schemas';
 import { cardsOf, openBoxes } from './views';
 
@@ -98,7 +98,7 @@ function stopsOf(takes: readonly Take[]): PickStop[] {
       return {
         partCode: line.partCode,
         name: line.name,
-        family: familyOfPart({ name: line.name, values: PartValues.parse(JSON.parse(line.values)) }),
+        family: silhouetteOf(PartValues.parse(JSON.parse(line.values))),
         lotCode,
         // Cut lengths are cut one by one: "3 of 14 m" tells more than 42 m.
         amount: line.unit === 'each' ? String(total) : cuts(these),

@@ -4,7 +4,6 @@ import type { PartUnit } from '../parts/schemas';
 import { type Instant, days, minutes, showClock } from '../time';
 import type { BoxState, LotPlace, MassView } from './schemas';
 
-export { familyOfPart } from './part-family';
 export { isSerial } from './serial';
 
 /** A claim holds this long after the packer's last scan; then somebody else may take the box over. */

@@ -121,7 +121,10 @@ const EarthLead = z.strictObject({
   kind: z.literal('earth-lead'),
   length: metres(0.2, 50, 'A lead is 0.2 to 50 m long.'),
 });
-const Hardware = z.strictObject({ kind: z.literal('hardware') });
+/** Hardware is one kind of many shapes: which of them stands for the part in pictures. */
+export const HardwareDrawing = z.enum(['terminal', 'board', 'knob', 'screw', 'packet']);
+
+const Hardware = z.strictObject({ kind: z.literal('hardware'), drawing: HardwareDrawing.optional() });
 const Tool = z.strictObject({ kind: z.literal('tool') });
 const Print = z.strictObject({ kind: z.literal('print') });
 const Packaging = z.strictObject({ kind: z.literal('packaging') });
@@ -184,9 +187,13 @@ export type Silhouette =
   | 'aerial'
   | 'earth'
   | 'terminal'
+  | 'board'
+  | 'knob'
+  | 'screw'
   | 'tool'
   | 'guide'
-  | 'packet';
+  | 'packet'
+  | 'box';
 
 interface KindEntry {
   label: string;
@@ -226,8 +233,15 @@ export const partKinds: Record<PartKind, KindEntry> = {
   hardware: { label: 'Terminal and hardware', unit: 'each', places: ['hardware'], silhouette: 'terminal' },
   tool: { label: 'Tool', unit: 'each', places: ['tool'], silhouette: 'tool' },
   print: { label: 'Print', unit: 'each', places: ['print'], silhouette: 'guide' },
-  packaging: { label: 'Packaging', unit: 'each', places: ['packaging'], silhouette: 'packet' },
+  packaging: { label: 'Packaging', unit: 'each', places: ['packaging'], silhouette: 'box' },
 };
+
+/** How a part is drawn: by its kind, hardware by its own drawing, a pair of capsules on a band as a headset. */
+export function silhouetteOf(values: PartValues): Silhouette {
+  if (values.kind === 'hardware') return values.drawing ?? 'packet';
+  if (values.kind === 'earphone' && values.earphoneKind !== 'ceramic') return 'headset';
+  return partKinds[values.kind].silhouette;
+}
 
 /** The kinds in the order they are listed. */
 export const PART_KINDS = Object.keys(partKinds) as [PartKind, ...PartKind[]]; // the keys of the table above

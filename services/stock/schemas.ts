@@ -1,6 +1,5 @@
 import { z } from 'zod';
 import { BinId, LotId, PartId } from '../ids';
-import { type PartKind, partKinds } from '../parts/schemas';
 
 export const LotCode = z
   .string()
@@ -63,7 +62,8 @@ export const StoredPart = z.strictObject({
   id: PartId,
   code: z.string(),
   name: z.string(),
-  kind: z.custom<PartKind>((kind) => typeof kind === 'string' && Object.hasOwn(partKinds, kind)),
+  /** Which drawing stands for it. */
+  silhouette: z.string(),
   unit: z.enum(['each', 'metre', 'gram']),
   onHand: z.int(),
   accepted: z.int(),

@@ -2,6 +2,7 @@ import type { Knex } from 'knex';
 import { type Actor, must } from '../access';
 import { partsOfBox } from '../kits/rules';
 import type { VersionContent } from '../kits/schemas';
+import { PartValues, silhouetteOf } from '../parts/schemas';
 import { now, reading } from '../record';
 import { type Buildable, availableFrom, buildableFrom } from './rules';
 import * as rows from './rows';
@@ -82,7 +83,7 @@ export async function readStore(actor: Actor): Promise<StoreView> {
       'parts.id as id',
       'parts.code as code',
       'parts.name as name',
-      'parts.kind as kind',
+      'parts.values as values',
       'parts.unit as unit',
       'part_stock.accepted as accepted',
       'part_stock.reserved as reserved',
@@ -102,7 +103,7 @@ export async function readStore(actor: Actor): Promise<StoreView> {
         id: part.id,
         code: part.code,
         name: part.name,
-        kind: part.kind,
+        silhouette: silhouetteOf(PartValues.parse(JSON.parse(part.values))),
         unit: part.unit,
         onHand: held.reduce((all, lot) => all + lot.onHand, 0),
         ...sums,
@@ -130,7 +131,7 @@ interface PartLine {
   id: string;
   code: string;
   name: string;
-  kind: string;
+  values: string;
   unit: string;
   accepted: number | null;
   reserved: number | null;

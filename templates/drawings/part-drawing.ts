@@ -12,6 +12,7 @@ import {
   knob,
   packet,
   resistor,
+  screw,
   terminal,
   tool,
 } from './parts/small';
@@ -36,6 +37,7 @@ const silhouettes = {
   rod,
   board,
   knob,
+  screw,
   guide,
   packet,
   box,

@@ -112,6 +112,20 @@ export function knob(): Shape[] {
   ];
 }
 
+/** A wood screw lying: slotted head, thread, point. */
+export function screw(): Shape[] {
+  const thread = Array.from({ length: 8 }, (_, index) => {
+    const x = 38 + index * 5.4;
+    return path(`M${at(x)} 33l-3.500 14`, { stroke: 'ink', line: 1.2 });
+  });
+  return [
+    path('M30 34H78L92 40L78 46H30Z', { fill: 'card', stroke: 'ink', line: 1.4 }),
+    ...thread,
+    path('M30 34L16 22C10 32 10 48 16 58L30 46Z', { fill: 'copper-lite', stroke: 'ink', line: 1.4 }),
+    path('M13 40h8', { stroke: 'ink', line: 2 }),
+  ];
+}
+
 export function guide(): Shape[] {
   return [
     path('M18 20q16-8 32 0q16-8 32 0v46q-16-8-32 0q-16-8-32 0Z', { fill: 'card', stroke: 'ink', line: 1.5 }),
