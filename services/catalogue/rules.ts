@@ -42,10 +42,23 @@ export function shapeOf(content: Pick<VersionContent, 'lines' | 'circuit'>): Kit
   const kinds = content.lines.map((line) => line.part?.values);
   const { winding } = content.circuit;
   const earphone = kinds.find((values) => values?.kind === 'earphone');
+  const former = kinds.find((values) => values?.kind === 'coil-former');
+  const wire = kinds.find((values) => values?.kind === 'wire');
+  const vanes = kinds.find((values) => values?.kind === 'variable-capacitor');
+  const pitch = winding.pitch ?? (wire?.kind === 'wire' ? wire.overall : null);
   return {
     coil: 'tube',
     turns: winding.turns,
     taps: [winding.aerialTap, winding.detectorTap].filter((tap) => tap !== null),
+    tube:
+      former?.kind === 'coil-former' && pitch !== null
+        ? {
+            length: former.length,
+            diameter: former.outerDiameter.nominal,
+            wound: Math.min(former.length, pitch * winding.turns),
+          }
+        : null,
+    largest: vanes?.kind === 'variable-capacitor' ? vanes.max.nominal : null,
     tuning: kinds.some((values) => values?.kind === 'foil-capacitor') ? 'foil-plates' : 'vanes',
     earphone: earphone?.kind === 'earphone' && earphone.earphoneKind !== 'ceramic' ? 'headset' : 'earpiece',
   };

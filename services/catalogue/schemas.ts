@@ -45,7 +45,11 @@ export const KitShape = z.strictObject({
   coil: z.enum(['flat', 'tube', 'rod']),
   turns: z.int(),
   taps: z.array(z.int()),
+  /** The former's length and diameter and the length of the winding on it, metres. */
+  tube: z.strictObject({ length: z.number(), diameter: z.number(), wound: z.number() }).nullable(),
   tuning: z.enum(['vanes', 'foil-plates', 'slider']),
+  /** Largest capacitance of the vanes, farads. */
+  largest: z.number().nullable(),
   earphone: z.enum(['earpiece', 'headset']),
 });
 export type KitShape = z.infer<typeof KitShape>;

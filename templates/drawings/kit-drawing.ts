@@ -1,21 +1,31 @@
 import { foilPlates, vanes } from './parts/capacitors';
-import { flatCoil, placed, rod, tubeCoil } from './parts/coils';
+import { flatCoil, MOST_TURNS_DRAWN, placed, rod, tubeCoil, type TubeBox } from './parts/coils';
 import { detector, earpiece, headset, terminal } from './parts/small';
 import { at, circle, line, path, rect, words, type Drawing, type Shape } from './shapes';
+
+/** A former and the winding on it, metres. */
+type Tube = { length: number; diameter: number; wound: number };
 
 /** What of a kit decides how it looks. */
 export type KitLook = {
   coil:
     | { form: 'flat'; spokes: number; turns: number }
-    | { form: 'tube'; turns: number; taps: readonly number[] }
+    | { form: 'tube'; turns: number; taps: readonly number[]; tube?: Tube }
     | { form: 'rod' };
   tuning: 'vanes' | 'foil-plates' | 'slider';
+  /** Largest capacitance of the vanes, farads: a larger capacitor is drawn larger. */
+  largest?: number;
   earphone: 'earpiece' | 'headset';
 };
 
 /** The kit unpacked on the shop's front: meant for the `plate` scheme, 720 by 404. */
 export function posterDrawing(kit: KitLook): Drawing {
   const wire = (d: string): Shape => path(d, { stroke: 'copper', line: 3, roundEnds: true });
+  const round = { cx: 404, cy: 200, r: 184 };
+  const box = kit.coil.form === 'tube' ? tubeBox(kit.coil.tube, round) : null;
+  const crown = box ? at(box.y) : 128;
+  const foot = box ? at(box.y + box.diameter + box.diameter * 0.28) : 318;
+  const [left, right] = box ? [at(box.x + box.from), at(box.x + box.from + box.winding)] : [268, 538];
   return {
     width: 720,
     height: 404,
@@ -28,11 +38,11 @@ export function posterDrawing(kit: KitLook): Drawing {
             wire('M648 271C648 372 588 384 532 338'),
           ]
         : [
-            wire('M60 60C180 20 300 30 352 128'),
-            wire('M268 318C262 372 250 388 208 352'),
-            wire('M648 282C648 372 548 396 538 318'),
+            wire(`M60 60C180 20 300 ${Math.min(30, crown - 40)} ${at((left + right) / 2)} ${crown}`),
+            wire(`M${left - 4} ${foot}C${left - 10} ${foot + 54} ${left - 20} ${Math.min(396, foot + 70)} 208 352`),
+            wire(`M648 282C648 372 ${right + 10} ${Math.min(400, foot + 78)} ${right + 4} ${foot}`),
           ]),
-      ...bigCoil(kit.coil, { cx: 404, cy: 200, r: 184 }, 1.6),
+      ...bigCoil(kit.coil, round, 1.6),
       ...tuner(kit.tuning, { x: 150, y: 296, r: 80, depth: 5, turn: 24 }),
       placed(32, 88, 1.2, detector(), -12),
       placed(14, 24, 0.9, terminal()),
@@ -76,7 +86,7 @@ export function stageDrawing(kit: KitLook, options: { callouts: boolean }): Draw
 export function cardDrawing(kit: KitLook): Drawing {
   const knobSide: Shape[] =
     kit.tuning === 'vanes'
-      ? vanes(226, 104, 30, { depth: 3, turn: 28, line: 1.3 })
+      ? vanes(222, 106, at(30 * vaneScale(kit.largest)), { depth: 3, turn: 28, line: 1.3 })
       : kit.tuning === 'foil-plates'
         ? [placed(180, 62, 0.9, foilPlates())]
         : [];
@@ -84,10 +94,42 @@ export function cardDrawing(kit: KitLook): Drawing {
     kit.coil.form === 'flat'
       ? flatCoil(144, 75, 64, kit.coil, 1.3)
       : kit.coil.form === 'tube'
-        ? tubeCoil({ x: 60, y: 44, length: 150, diameter: 58, from: 18, winding: 114 }, kit.coil, 1.5)
+        ? wound(cardTube(kit.coil.tube), kit.coil, 1.5)
         : [placed(40, -2, 1.9, rod())];
-  return { width: 286, height: 150, title: null, shapes: [...coil, ...knobSide] };
+  const phone = kit.earphone === 'headset' ? placed(226, 6, 0.5, headset()) : placed(232, 10, 0.46, earpiece());
+  return { width: 286, height: 150, title: null, shapes: [...coil, ...knobSide, phone] };
 }
+
+/** A card shows every coil to one scale, so that a wide tube looks wide beside a slim one: 1.12 units a millimetre. */
+function cardTube(tube: Tube = usualTube): TubeBox {
+  const scale = Math.min(1120, 176 / tube.length, 108 / tube.diameter);
+  const [length, diameter, winding] = [tube.length * scale, tube.diameter * scale, tube.wound * scale];
+  return { x: at(118 - length / 2), y: at(68 - diameter / 2), length, diameter, from: (length - winding) / 2, winding };
+}
+
+/** Proportions where no former is known. */
+const usualTube: Tube = { length: 0.11, diameter: 0.05, wound: 0.08 };
+
+/** A coil of this tube in the room of a round one, its foot where the round one's tube would have it. */
+function tubeBox(tube: Tube = usualTube, { cx, cy, r }: { cx: number; cy: number; r: number }): TubeBox {
+  const scale = Math.min((r * 1.9) / tube.length, (r * 1.16) / tube.diameter);
+  const [length, diameter, winding] = [tube.length * scale, tube.diameter * scale, tube.wound * scale];
+  return {
+    x: at(cx - length / 2),
+    y: at(cy + r * 0.42 - diameter),
+    length,
+    diameter,
+    from: (length - winding) / 2,
+    winding,
+  };
+}
+
+/** No turns closer than three lines and a half, where they would run into a grey. */
+const wound = (box: TubeBox, coil: { turns: number; taps: readonly number[] }, lineWidth: number) =>
+  tubeCoil(box, { ...coil, most: Math.min(MOST_TURNS_DRAWN, Math.floor(box.winding / (lineWidth * 3.5))) }, lineWidth);
+
+/** An area follows the capacitance; 365 pF is drawn at full size. */
+const vaneScale = (farads = 3.65e-10) => Math.min(1.15, Math.max(0.6, Math.sqrt(farads / 3.65e-10)));
 
 function bigCoil(coil: KitLook['coil'], round: { cx: number; cy: number; r: number }, lineWidth: number): Shape[] {
   const { cx, cy, r } = round;
@@ -95,11 +137,7 @@ function bigCoil(coil: KitLook['coil'], round: { cx: number; cy: number; r: numb
     case 'flat':
       return flatCoil(cx, cy, r, coil, lineWidth);
     case 'tube':
-      return tubeCoil(
-        { x: cx - r * 0.95, y: cy - r * 0.42, length: r * 1.9, diameter: r * 0.84, from: r * 0.24, winding: r * 1.4 },
-        coil,
-        lineWidth,
-      );
+      return wound(tubeBox(coil.tube, { cx, cy, r }), coil, lineWidth);
     case 'rod':
       return [placed(cx - r * 1.1, cy - r * 0.9, at((r * 2.2) / 100), rod())];
   }
@@ -113,7 +151,12 @@ function stageCoil(coil: KitLook['coil']): Shape[] {
       path('M392 222C398 190 416 196 414 236', { stroke: 'copper', line: 2.4, roundEnds: true }),
     ];
   }
-  return bigCoil(coil, { cx: 226, cy: 214, r: 150 }, 1.5);
+  const room = { cx: 226, cy: 214, r: 150 };
+  const coilShapes = bigCoil(coil, room, 1.5);
+  // The turns drawn are fewer than those wound: the true count stands under them.
+  return coil.form === 'tube'
+    ? [...coilShapes, words(room.cx, 294, `${coil.turns} turns`, { size: 13, anchor: 'middle', face: 'figures' })]
+    : coilShapes;
 }
 
 type TunerPlace = { x: number; y: number; r: number; depth: number; turn: number };

@@ -69,7 +69,12 @@ function woundTurn({ cx, cy, spokes, step, turn, inner, pitch }: WoundTurn): str
   return parts.join('');
 }
 
-export type TubeCoil = { turns: number; taps?: readonly number[] };
+export type TubeCoil = {
+  turns: number;
+  taps?: readonly number[];
+  /** Turns drawn at most. */
+  most?: number;
+};
 
 export type TubeBox = {
   x: number;
@@ -87,7 +92,7 @@ export function tubeCoil(box: TubeBox, coil: TubeCoil, lineWidth: number): Shape
   const { x, y, length, diameter, from, winding } = box;
   const ry = diameter / 2;
   const rx = at(ry * 0.32);
-  const drawn = Math.min(coil.turns, MOST_TURNS_DRAWN);
+  const drawn = Math.max(1, Math.min(coil.turns, coil.most ?? MOST_TURNS_DRAWN));
   const pitch = winding / drawn;
   const bottom = y + diameter;
   const shapes: Shape[] = [
