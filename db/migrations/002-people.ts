@@ -17,6 +17,7 @@ export async function up(sql: Knex): Promise<void> {
     table.integer('session_version').notNullable();
     table.integer('created_at').notNullable();
     table.integer('disabled_at');
+    table.index(['kind', 'name', 'id'], 'people_by_kind');
   });
   await createTable(sql, 'person_roles', (table) => {
     table.string('person_id').notNullable().references('people.id');
@@ -47,7 +48,7 @@ export async function up(sql: Knex): Promise<void> {
     table.string('key').primary();
     table.integer('failures').notNullable().checkBetween([0, 1_000_000], 'attempts_failures');
     table.integer('not_before').notNullable();
-    table.integer('updated_at').notNullable();
+    table.integer('updated_at').notNullable().index('attempts_by_age');
   });
 }
 

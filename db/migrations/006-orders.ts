@@ -71,10 +71,20 @@ export async function up(sql: Knex): Promise<void> {
     table.integer('session_attempt').notNullable();
     /** Why a person has to look at it; empty as a rule. */
     table.string('look_at_it').notNullable();
+    /** 1 where somebody has to: what an index can lead to. */
+    table.specificType(
+      'to_look_at',
+      "integer generated always as (case when look_at_it = '' then 0 else 1 end) stored",
+    );
     table.check('total_minor = lines_minor + delivery_minor', [], 'order_adds_up');
-    table.index(['customer_id', 'placed_at'], 'orders_by_customer');
-    table.index(['fulfilment', 'paid_at'], 'orders_by_fulfilment');
-    table.index(['payment', 'placed_at'], 'orders_by_payment');
+    table.index(['customer_id', 'placed_at', 'id'], 'orders_by_customer');
+    table.index(['fulfilment', 'paid_at', 'id'], 'orders_by_fulfilment');
+    table.index(['fulfilment', 'placed_at', 'id'], 'orders_by_progress');
+    table.index(['payment', 'placed_at', 'id'], 'orders_by_payment');
+    table.index(['fulfilment', 'payment', 'placed_at', 'id'], 'orders_by_state');
+    table.index(['payment', 'paid_at'], 'orders_by_paying');
+    table.index(['fulfilment', 'shipped_at'], 'orders_by_shipping');
+    table.index(['to_look_at', 'placed_at', 'id'], 'orders_to_look_at');
     table.index(['email', 'placed_at'], 'orders_by_email');
     table.index(['placed_at', 'id'], 'orders_by_age');
   });
@@ -126,7 +136,7 @@ export async function up(sql: Knex): Promise<void> {
     table.string('currency').notNullable();
     /** The provider's id of the movement of money: it is booked once. */
     table.string('reference').notNullable().unique();
-    table.integer('at').notNullable();
+    table.integer('at').notNullable().index('order_money_by_time');
   });
   await makeAppendOnly(sql, 'order_money');
   await createTable(sql, 'invoices', (table) => {

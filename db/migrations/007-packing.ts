@@ -8,7 +8,7 @@ export async function up(sql: Knex): Promise<void> {
     table.string('order_id').notNullable().references('orders.id').index('shipments_by_order');
     table.string('carrier').notNullable();
     table.string('tracking_number').notNullable();
-    table.integer('shipped_at').notNullable();
+    table.integer('shipped_at').notNullable().index('shipments_by_time');
     table.string('shipped_by').notNullable().references('people.id').index('shipments_by_person');
   });
   await createTable(sql, 'boxes', (table) => {

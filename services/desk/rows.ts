@@ -26,8 +26,7 @@ export function sentSince(sql: Knex, since: number): Promise<SentOrder[]> {
     .join('order_lines', 'order_lines.order_id', 'orders.id')
     .where('orders.fulfilment', 'shipped')
     .andWhere('orders.shipped_at', '>=', since)
-    .whereNotNull('orders.paid_at')
-    .groupBy('orders.id', 'orders.paid_at', 'orders.shipped_at')
+    .groupBy('orders.shipped_at', 'orders.id', 'orders.paid_at')
     .select<SentOrder[]>({ paidAt: 'orders.paid_at', shippedAt: 'orders.shipped_at' })
     .sum({ boxes: 'order_lines.quantity' });
 }
@@ -78,7 +77,7 @@ export async function unpaidOrders(sql: Knex): Promise<number> {
 
 export function ordersToLookAt(sql: Knex): Promise<{ id: string; number: string; why: string }[]> {
   return sql('orders')
-    .whereNot('look_at_it', '')
+    .where({ to_look_at: 1 })
     .orderBy([
       { column: 'placed_at', order: 'desc' },
       { column: 'id', order: 'desc' },

@@ -14,7 +14,7 @@ const filters: Record<OrderFilter, (query: Knex.QueryBuilder) => Knex.QueryBuild
       .whereIn('orders.payment', ['paid', 'part-refunded'])
       .whereIn('orders.fulfilment', ['allocated', 'backordered', 'picking', 'packed']),
   unpaid: (query) => query.where('orders.payment', 'awaiting-payment'),
-  'look-at': (query) => query.whereNot('orders.look_at_it', ''),
+  'look-at': (query) => query.where('orders.to_look_at', 1),
   sent: (query) => query.where('orders.fulfilment', 'shipped'),
   cancelled: (query) => query.where('orders.fulfilment', 'cancelled'),
 };
@@ -48,11 +48,14 @@ interface Row {
 async function page(query: Knex.QueryBuilder, after: string | undefined, forStaff: boolean): Promise<OrderPage> {
   if (after !== undefined) {
     const [at, id = ''] = after.split('-');
-    query.andWhere((older) =>
-      older
-        .where('orders.placed_at', '<', Number(at))
-        .orWhere((same) => same.where('orders.placed_at', Number(at)).andWhere('orders.id', '<', id)),
-    );
+    // The first of the two conditions is what the index is entered by.
+    query
+      .andWhere('orders.placed_at', '<=', Number(at))
+      .andWhere((older) =>
+        older
+          .where('orders.placed_at', '<', Number(at))
+          .orWhere((same) => same.where('orders.placed_at', Number(at)).andWhere('orders.id', '<', id)),
+      );
   }
   const found: Row[] = await query
     .orderBy([
@@ -87,6 +90,7 @@ async function page(query: Knex.QueryBuilder, after: string | undefined, forStaf
 
 /** "2 Ebb Lamp B, 1 Tollgate F" by order. */
 async function kitsOf(orderIds: readonly string[]): Promise<Map<string, { kits: string; quantity: number }>> {
+  if (orderIds.length === 0) return new Map();
   const lines = await reading()('order_lines')
     .join('versions', 'versions.id', 'order_lines.version_id')
     .join('kits', 'kits.id', 'versions.kit_id')

@@ -286,7 +286,7 @@ export async function owedBack(sql: Knex): Promise<Order[]> {
   const found = await sql('orders')
     .where({ fulfilment: 'cancelled' })
     .whereIn('payment', ['paid', 'part-refunded'])
-    .orderBy(['placed_at', 'id'])
+    .orderBy(['payment', 'placed_at', 'id'])
     .select<StoredOrder[]>(orderColumns);
   return found.map(toOrder);
 }
