@@ -6,7 +6,7 @@ export const metadata: Metadata = { title: 'Not here' };
 
 export default function NotFound() {
   return (
-    <PlainPage title="Nothing stands at this address">
+    <PlainPage title="Nothing stands at this address" drawing="reel">
       <p>
         It may have been moved, or the address has a slip in it. If a link of ours led you here, the link is wrong, not
         you.

@@ -1,3 +1,4 @@
+import type { Metadata } from 'next';
 import { view } from '@/app/view';
 import { FrontReach } from '@/components/shop/front-reach';
 import { HowChecked } from '@/components/shop/how-checked';
@@ -9,18 +10,29 @@ import { Empty } from '@/components/ui/empty';
 import { TextLink } from '@/components/ui/link-button';
 import { listOnSale, readKitPage } from '@/services/catalogue';
 
-type Search = Promise<Record<string, string | string[] | undefined>>;
+interface Props {
+  searchParams: Promise<Record<string, string | string[] | undefined>>;
+}
+
+const searched = async ({ searchParams }: Props): Promise<string> => {
+  const asked = (await searchParams)['q'];
+  return typeof asked === 'string' ? asked.trim().slice(0, 80) : '';
+};
+
+export async function generateMetadata(props: Props): Promise<Metadata> {
+  const q = await searched(props);
+  return q === '' ? {} : { title: `Kits that match ‘${q}’` };
+}
 
 /** The catalogue: a poster, the newest kit's reach, and a card for each kit on sale. */
-export default async function CataloguePage({ searchParams }: { searchParams: Search }) {
-  const asked = (await searchParams)['q'];
-  const q = typeof asked === 'string' ? asked.trim().slice(0, 80) : '';
+export default async function CataloguePage(props: Props) {
+  const q = await searched(props);
   const { kits } = await view((actor) => listOnSale(actor, { q }));
   const newest = kits.find((kit) => kit.prices.length > 0 && kit.ready > 0) ?? kits[0];
   const front = newest && q === '' ? await view((actor) => readKitPage(actor, newest.code)) : null;
   return (
     <main id="main">
-      {q === '' && <Poster newest={newest} />}
+      {q === '' && <Poster kits={kits} newest={newest} />}
       {front && <FrontReach kit={front} />}
       <div id="kits" className="mx-auto max-w-page px-4 py-8 sm:px-6">
         <div className="mb-4 flex flex-wrap items-baseline justify-between gap-x-6 gap-y-2">
@@ -53,7 +65,7 @@ export default async function CataloguePage({ searchParams }: { searchParams: Se
             When a checker releases the first version, it stands here with its reach and its price.
           </Empty>
         ) : (
-          <Empty title={`No kit matches ‘${q}’`}>
+          <Empty title="Try another word">
             Look by a kit’s name or number, by a station, or by its frequency in kHz, such as 846.
           </Empty>
         )}

@@ -15,7 +15,7 @@ export function ChangeTable({ changes }: { changes: readonly ChangeView[] }) {
       columns={[
         { key: 'seq', head: 'Line', figures: true, cell: (change) => change.seq },
         { key: 'at', head: 'When', cell: (change) => showMoment(change.at) },
-        { key: 'who', head: 'Who', cell: (change) => change.who },
+        { key: 'who', head: 'Who', cell: (change) => whoWords[change.who] ?? change.who },
         { key: 'what', head: 'What', isRowHead: true, cell: (change) => inWords(change.action) },
         { key: 'subject', head: 'Of', cell: subjectOf },
         { key: 'more', head: 'Before and after', cell: (change) => <BeforeAfter change={change} /> },
@@ -23,6 +23,14 @@ export function ChangeTable({ changes }: { changes: readonly ChangeView[] }) {
     />
   );
 }
+
+/** Who is not a person, in words. */
+const whoWords: Readonly<Record<string, string>> = {
+  visitor: 'a guest',
+  stripe: 'payment provider',
+  worker: 'the worker',
+  command: 'a command',
+};
 
 /** "version.sent-to-check" reads "version sent to check". */
 const inWords = (action: string) => action.replace(/[.-]/g, ' ');

@@ -96,7 +96,7 @@ function VersionLine({ kit, version }: { kit: KitRow; version: VersionRow }) {
   const { summary, lacks } = version;
   const verdict = verdictOf(version);
   return (
-    <li className="relative grid items-center gap-x-6 gap-y-1 border-b border-rule py-3 hover:bg-card md:grid-cols-[11rem_minmax(12rem,20rem)_minmax(0,1fr)_11rem]">
+    <li className="relative grid items-center gap-x-6 gap-y-1 border-b border-rule py-3 hover:bg-card md:grid-cols-[11rem_minmax(9rem,20rem)_minmax(0,1fr)_auto]">
       <Link
         href={`/bench/${version.id}`}
         className="flex min-h-target items-center gap-3 before:absolute before:inset-0"
@@ -114,7 +114,7 @@ function VersionLine({ kit, version }: { kit: KitRow; version: VersionRow }) {
         <Sign kind={verdict.sign} size={18} className="mt-0.5 shrink-0" />
         <span>{lacks ?? verdict.text}</span>
       </p>
-      <p className="text-caption text-ink2 md:text-right">{whenWords(version)}</p>
+      <p className="text-caption text-ink2 md:text-right md:whitespace-nowrap">{whenWords(version)}</p>
     </li>
   );
 }

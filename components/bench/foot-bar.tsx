@@ -22,14 +22,17 @@ export interface FootBarProps {
 /** Cost, mass and the state of saving at the left, the way on at the right. Stays in sight. */
 export function FootBar({ costMinor, massMilligrams, pieces, save, onRetry, children }: FootBarProps) {
   return (
-    <footer className="sticky bottom-18 z-10 flex flex-wrap items-center gap-x-5 gap-y-2 border-t border-rule bg-paper px-4 py-2.5 sm:px-6 md:bottom-0">
-      <p className="text-table">
-        Parts cost <span className="font-figures font-semibold">{formatMoney(money(costMinor, 'GBP'))}</span>,{' '}
+    <footer className="sticky bottom-18 z-10 flex flex-wrap items-center gap-x-5 gap-y-1 border-t border-rule bg-paper px-4 py-2 sm:px-6 md:bottom-0 md:py-2.5">
+      <p className="text-caption sm:text-table">
+        <span className="max-sm:sr-only">Parts cost</span>{' '}
+        <span className="font-figures font-semibold">{formatMoney(money(costMinor, 'GBP'))}</span>,{' '}
         <span className="font-figures font-semibold">{grouped(Math.round(massMilligrams / 1000))}</span> g,{' '}
         <span className="font-figures font-semibold">{pieces}</span> {pieces === 1 ? 'piece' : 'pieces'}.
       </p>
       {save && <SaveMark save={save} onRetry={onRetry} />}
-      <div className="ml-auto flex flex-wrap items-center gap-3">{children}</div>
+      <div className="ml-auto flex flex-wrap items-center justify-end gap-x-3 gap-y-1 max-sm:basis-full">
+        {children}
+      </div>
     </footer>
   );
 }

@@ -62,7 +62,7 @@ export function PartField(props: PartFieldProps) {
           id={id}
           label={label}
           value={String(current ?? '')}
-          options={Object.entries(field.options).map(([value, words]) => ({ value, label: words }))}
+          options={Object.entries(field.options).map(([value, words]) => ({ value, label: capital(words) }))}
           onChange={(event) => onChange(key, event.target.value)}
           error={error}
           frameClassName="max-w-80"
@@ -92,6 +92,8 @@ export function PartField(props: PartFieldProps) {
       );
   }
 }
+
+const capital = (words: string) => words.charAt(0).toUpperCase() + words.slice(1);
 
 const anyValue = ValueSchema(-Infinity, Infinity, '');
 const asValue = (value: unknown): PartValue | undefined => {

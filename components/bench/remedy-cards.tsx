@@ -14,11 +14,14 @@ const kHz = (hertz: number) => Math.round(hertz / 1000);
 
 /** Ways to mend it, each worked out before it is pressed. */
 export function RemedyCards({ band, remedies, onTry }: RemedyCardsProps) {
+  const mends = remedies.some(({ stops }) => stops.length === 0);
   return (
     <section aria-labelledby="remedies-title">
       <h3 id="remedies-title" className="mb-2 font-bold">
-        {count[remedies.length] ?? `${remedies.length} ways`} to mend it{' '}
-        <span className="font-normal text-caption text-ink2">each worked out with the same tolerances</span>
+        {mends ? `${count[remedies.length] ?? `${remedies.length} ways`} to mend it` : 'Nothing mends it alone'}{' '}
+        <span className="font-normal text-caption text-ink2">
+          {mends ? 'each worked out with the same tolerances' : 'these come nearest; two of them together may do'}
+        </span>
       </h3>
       <ul className="grid gap-3 sm:grid-cols-2 lg:grid-cols-3">
         {remedies.map((remedy) => (

@@ -70,7 +70,7 @@ export function ValueFields({ id, label, unit, hint, optional, value, onChange, 
               }}
             />
             <Select
-              label="Where the value comes from"
+              label="Source"
               value={value.origin}
               options={optionsOf(origins)}
               onChange={(event) => {

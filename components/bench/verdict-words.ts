@@ -2,7 +2,7 @@ import type { Finding } from '@/services/kits/rules';
 import { notesIn, stopsIn } from '@/services/kits/rules';
 import type { Verdict } from '@/services/receiver';
 import type { SignKind } from '@/components/ui/sign';
-import { shownDifference, shownKHz } from '@/templates/drawings/reach-axis';
+import { shownDifference, shownEdge, shownKHz } from '@/templates/drawings/reach-axis';
 
 export interface Headline {
   sign: SignKind;
@@ -49,12 +49,12 @@ function shortText(
 ): string {
   const { lo, hi } = reach.corners;
   if (short.low && short.high) {
-    return `At worst case this version tunes ${shownKHz(lo)} to ${shownKHz(hi)} kHz. The band asks for ${shownKHz(band.lo)} to ${shownKHz(band.hi)}.`;
+    return `At worst case this version tunes ${shownKHz(lo)} to ${shownKHz(hi)} kHz. The band asks for ${shownEdge(band.lo)} to ${shownEdge(band.hi)}.`;
   }
   if (short.low) {
-    return `At worst case this version stops at ${shownKHz(lo)} kHz. The band asks for ${shownKHz(band.lo)}, so ${shownDifference(lo - band.lo)} kHz is out of reach.`;
+    return `At worst case this version stops at ${shownKHz(lo)} kHz. The band asks for ${shownEdge(band.lo)}, so ${shownDifference(lo - band.lo)} kHz is out of reach.`;
   }
-  return `At worst case this version ends at ${shownKHz(hi)} kHz. The band asks for ${shownKHz(band.hi)}, so ${shownDifference(band.hi - hi)} kHz is out of reach.`;
+  return `At worst case this version ends at ${shownKHz(hi)} kHz. The band asks for ${shownEdge(band.hi)}, so ${shownDifference(band.hi - hi)} kHz is out of reach.`;
 }
 
 function clears({ reach }: Verdict, notes: number, band: { lo: number; hi: number }): Headline {

@@ -2,7 +2,7 @@
 
 import { QueryClient, QueryClientProvider } from '@tanstack/react-query';
 import { useRouter } from 'next/navigation';
-import { type ReactNode, useState, useSyncExternalStore } from 'react';
+import { useState, useSyncExternalStore } from 'react';
 import type { Action } from '@/components/forms/action-result';
 import { Button } from '@/components/ui/button';
 import { Notice } from '@/components/ui/notice';
@@ -17,12 +17,12 @@ import { findParts, otherPart } from './find-parts';
 import { FootBar } from './foot-bar';
 import { HeldPanel } from './held-panel';
 import { LinesPane } from './lines-pane';
+import { PhonePanes, sentenceOf } from './phone-panes';
 import { nextReference, referenceLetters } from './places';
 import { StateNotice } from './state-notice';
 import { useVerdict } from './use-verdict';
 import { VerdictPane } from './verdict-pane';
 import type { TriedRemedy, VerdictAnswer } from './verdict-messages';
-import { headlineOf } from './verdict-words';
 import { VersionHead } from './version-head';
 import { type VersionDeeds, VersionStore } from './version-store';
 
@@ -143,7 +143,7 @@ function Bench({ view, mayEdit, deeds }: WorkbenchProps) {
         page="parts"
         {...(mayEdit && { onStart: () => void start(), starting: deed === 'start' })}
       />
-      <PhonePanes pane={pane} onPane={setPane} sentence={sentenceOf(answer, content.kit.band)} />
+      <PhonePanes pane={pane} onPane={setPane} {...sentenceOf(answer, content.kit.band)} />
       <div className="grid flex-1 md:min-h-0 md:grid-cols-[minmax(0,5fr)_minmax(0,6fr)] lg:grid-cols-[minmax(0,560px)_minmax(0,1fr)]">
         <section
           aria-label="Parts and circuit"
@@ -243,43 +243,6 @@ function UndoButtons({ store, canUndo, canRedo }: { store: VersionStore; canUndo
       )}
     </>
   );
-}
-
-/** Under 900 px: the verdict sentence stays in sight, and one of two panes under it. */
-function PhonePanes({
-  pane,
-  onPane,
-  sentence,
-}: {
-  pane: 'parts' | 'verdict';
-  onPane: (pane: 'parts' | 'verdict') => void;
-  sentence: ReactNode;
-}) {
-  return (
-    <div className="sticky top-0 z-10 border-b border-rule bg-paper px-4 pt-2 md:hidden">
-      <p className="font-semibold">{sentence}</p>
-      <div role="group" aria-label="What is shown" className="mt-1 flex gap-2">
-        {(['parts', 'verdict'] as const).map((one) => (
-          <button
-            key={one}
-            type="button"
-            aria-pressed={pane === one}
-            onClick={() => onPane(one)}
-            className={`min-h-target flex-1 border-b-4 font-semibold ${pane === one ? 'border-copper' : 'border-transparent'}`}
-          >
-            {one === 'parts' ? 'Parts' : 'Verdict'}
-          </button>
-        ))}
-      </div>
-    </div>
-  );
-}
-
-function sentenceOf(answer: VerdictAnswer | null, band: { lo: number; hi: number }): string {
-  if (!answer) return 'Working out the reach';
-  if (answer.kind === 'lacks') return 'The verdict waits for parts';
-  if (answer.kind === 'invalid') return 'This set cannot be worked out';
-  return headlineOf(answer.live.verdict, answer.live.findings, band).title;
 }
 
 /** Why it cannot be sent yet, in words; undefined when it can. */

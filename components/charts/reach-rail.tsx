@@ -5,6 +5,7 @@ import {
   place,
   shortfall,
   shownDifference,
+  shownEdge,
   shownKHz,
   type Axis,
   type ReachView,
@@ -142,7 +143,7 @@ function Ends(props: { view: ReachView; axis: Axis; layout: RailLayout; tone: Ra
     return (
       <g className={`font-figures ${tone.text}`} fontSize={size}>
         <text x={percent(left)} y={at} textAnchor="start">
-          {shownKHz(view.band.lo)}
+          {shownEdge(view.band.lo)}
         </text>
         <text
           x={percent(right)}
@@ -150,7 +151,7 @@ function Ends(props: { view: ReachView; axis: Axis; layout: RailLayout; tone: Ra
           textAnchor={right - left < 0.4 ? 'start' : 'end'}
           dx={right - left < 0.4 ? 4 : 0}
         >
-          {shownKHz(view.band.hi)} kHz
+          {shownEdge(view.band.hi)} kHz
         </text>
       </g>
     );
@@ -163,7 +164,7 @@ function Ends(props: { view: ReachView; axis: Axis; layout: RailLayout; tone: Ra
     <g fontSize={size} className="font-text font-semibold">
       <text x={percent(left)} y={at} textAnchor="start" className={tone.band}>
         <tspan className={lowRemark && highRemark ? 'hidden @min-[420px]:inline' : ''}>band </tspan>
-        {shownKHz(view.band.lo)}
+        {shownEdge(view.band.lo)}
         {lowRemark && (
           <tspan dx="14" className={lowRemark.isShort ? `font-bold ${tone.short}` : tone.text}>
             {lowRemark.words}
@@ -174,7 +175,7 @@ function Ends(props: { view: ReachView; axis: Axis; layout: RailLayout; tone: Ra
         {highRemark && (
           <tspan className={highRemark.isShort ? `font-bold ${tone.short}` : tone.text}>{highRemark.words}</tspan>
         )}
-        <tspan dx={highRemark ? 14 : 0}>{shownKHz(view.band.hi)}</tspan>
+        <tspan dx={highRemark ? 14 : 0}>{shownEdge(view.band.hi)}</tspan>
         <tspan className={lowRemark && highRemark ? 'hidden @min-[420px]:inline' : ''}> kHz</tspan>
       </text>
     </g>

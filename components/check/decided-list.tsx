@@ -28,11 +28,11 @@ export function DecidedList({
       {entries.map((entry) => (
         <li
           key={entry.versionId}
-          className="relative grid items-center gap-x-6 gap-y-1 border-b border-rule py-3.5 hover:bg-card md:grid-cols-[24rem_minmax(8rem,18rem)_minmax(0,1fr)]"
+          className="relative grid grid-cols-[minmax(0,1fr)] items-center gap-x-6 gap-y-1 border-b border-rule py-3.5 hover:bg-card md:grid-cols-[24rem_minmax(8rem,18rem)_minmax(0,1fr)]"
         >
           <Link
             href={`/check/${entry.versionId}`}
-            className="flex min-h-target items-center gap-3 before:absolute before:inset-0"
+            className="flex min-h-target min-w-0 flex-wrap items-center gap-x-3 gap-y-1 before:absolute before:inset-0"
           >
             <Plate kit={entry.kitNumber} version={entry.letter} size="row" />
             <b className="min-w-0">{entry.kitName}</b>

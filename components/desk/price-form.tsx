@@ -49,7 +49,7 @@ export function PriceForm({ kit, onSet }: { kit: PricedKit; onSet: Action<SetPri
   return (
     <div className="grid gap-3">
       {steps.map((step, index) => (
-        <div key={index} className="flex flex-wrap items-start gap-3">
+        <div key={index} className="flex flex-wrap items-start gap-x-3">
           <TextField
             label="From, kits"
             inputMode="numeric"
@@ -70,7 +70,7 @@ export function PriceForm({ kit, onSet }: { kit: PricedKit; onSet: Action<SetPri
             frameClassName="w-44"
           />
           {index > 0 && (
-            <Button variant="quiet" className="mt-7" onClick={() => setSteps(steps.filter((_, at) => at !== index))}>
+            <Button variant="quiet" className="sm:mt-7" onClick={() => setSteps(steps.filter((_, at) => at !== index))}>
               Remove<span className="sr-only"> the step from {step.from} kits</span>
             </Button>
           )}

@@ -26,7 +26,7 @@ export function WeekFigures({ today }: { today: Today }) {
         </div>
         {rows.map(({ figure, words }) => (
           <p key={words} className="border-plate-line pr-4 lg:border-l lg:pl-5">
-            <span className="block font-figures text-total font-semibold">{figure}</span>
+            <span className="block font-figures text-[25px] leading-8 font-semibold sm:text-total">{figure}</span>
             <span className="text-on-enamel2">{words}</span>
           </p>
         ))}

@@ -45,51 +45,52 @@ export function PartLabel(props: PartLabelProps) {
     className,
   } = props;
   return (
-    <div
-      className={classes(
-        'relative grid min-h-14 grid-cols-[64px_1fr_auto] items-center gap-x-3 rounded-label py-[3px] pr-3 sm:grid-cols-[64px_1fr_auto_86px]',
-        looks[look],
-        className,
-      )}
-    >
-      <span
+    <div className={classes('@container', className)}>
+      <div
         className={classes(
-          'label-holder ml-1 grid h-[50px] place-items-center overflow-hidden bg-well',
-          look === 'empty' && '*:opacity-35',
+          'relative grid min-h-14 grid-cols-[64px_1fr_auto] items-center gap-x-3 rounded-label py-[3px] pr-3 @min-[440px]:grid-cols-[64px_1fr_auto_86px]',
+          looks[look],
         )}
       >
-        {drawing}
-      </span>
-      <span className="absolute top-[3px] left-1.5 rounded-[2px] border border-edge bg-card px-1 font-figures text-axis leading-[14px] font-semibold">
-        {reference}
-      </span>
-      <span className="min-w-0 leading-5">
-        <b className="block">{name}</b>
-        {detail !== undefined && (
-          <span className={classes('block text-head', look === 'stops' ? 'font-semibold text-crimson' : 'text-ink2')}>
-            {detail}
-          </span>
-        )}
-      </span>
-      <span className="text-right whitespace-nowrap">
-        {value !== undefined && (
-          <>
-            <span className="font-figures text-value font-semibold">{value}</span>
-            {unit !== undefined && <span className="ml-1 text-head text-ink2">{unit}</span>}
-            {typeof tolerance === 'number' && (
-              <span className="block text-axis text-ink2 sm:hidden">±{tolerance} %</span>
-            )}
-          </>
-        )}
-      </span>
-      <span className="hidden justify-items-center sm:grid">
-        {aside ??
-          (tolerance === undefined || tolerance === null ? (
-            <span className="text-head text-ink2">no value</span>
-          ) : (
-            <ToleranceWhisker tolerance={tolerance} measured={measured} />
-          ))}
-      </span>
+        <span
+          className={classes(
+            'label-holder ml-1 grid h-[50px] place-items-center overflow-hidden bg-well',
+            look === 'empty' && '*:opacity-35',
+          )}
+        >
+          {drawing}
+        </span>
+        <span className="absolute top-[3px] left-1.5 rounded-[2px] border border-edge bg-card px-1 font-figures text-axis leading-[14px] font-semibold">
+          {reference}
+        </span>
+        <span className="min-w-0 leading-5">
+          <b className="block">{name}</b>
+          {detail !== undefined && (
+            <span className={classes('block text-head', look === 'stops' ? 'font-semibold text-crimson' : 'text-ink2')}>
+              {detail}
+            </span>
+          )}
+        </span>
+        <span className="text-right whitespace-nowrap">
+          {value !== undefined && (
+            <>
+              <span className="font-figures text-value font-semibold">{value}</span>
+              {unit !== undefined && <span className="ml-1 text-head text-ink2">{unit}</span>}
+              {typeof tolerance === 'number' && (
+                <span className="block text-axis text-ink2 @min-[440px]:hidden">±{tolerance} %</span>
+              )}
+            </>
+          )}
+        </span>
+        <span className="hidden justify-items-center @min-[440px]:grid">
+          {aside ??
+            (tolerance === undefined || tolerance === null ? (
+              <span className="text-head text-ink2">no value</span>
+            ) : (
+              <ToleranceWhisker tolerance={tolerance} measured={measured} />
+            ))}
+        </span>
+      </div>
     </div>
   );
 }

@@ -67,8 +67,8 @@ export function TrayPlace(props: TrayPlaceProps) {
         looks[state],
       )}
     >
-      <span className="flex min-h-7 flex-wrap items-start justify-between gap-2 leading-6">
-        <b>{state === 'wrong' ? (word ?? stateWords.wrong) : name}</b>
+      <span className="flex min-h-7 items-start justify-between gap-2 leading-6">
+        <b className="min-w-0">{state === 'wrong' ? (word ?? stateWords.wrong) : name}</b>
         <StateMark state={state} isFloor={isFloor} />
       </span>
       <span
@@ -98,22 +98,22 @@ function StateMark({ state, isFloor }: { state: PlaceState; isFloor: boolean }) 
     case 'in':
       return (
         <>
-          <Sign kind="clears" size={size} />
+          <Sign kind="clears" size={size} className="shrink-0" />
           <span className="sr-only">{stateWords.in}</span>
         </>
       );
     case 'next':
       return (
-        <Tag tone="plate" className={isFloor ? 'px-3 text-value leading-7' : ''}>
+        <Tag tone="plate" className={classes('shrink-0', isFloor && 'px-3 text-value leading-7')}>
           Next
         </Tag>
       );
     case 'wrong':
-      return <Sign kind="stops" size={size} />;
+      return <Sign kind="stops" size={size} className="shrink-0" />;
     case 'bin-empty':
       return (
         <>
-          <Sign kind="note" size={size} />
+          <Sign kind="note" size={size} className="shrink-0" />
           <span className="sr-only">{stateWords['bin-empty']}</span>
         </>
       );

@@ -71,13 +71,9 @@ export function LidPanel({ box, answer, dismiss, deeds, change, isBusy, field }:
           <Sign kind={box.guide.scannedAt === null ? 'waiting' : 'clears'} size={28} />
           <span>
             <b className="block">{box.guide.scannedAt === null ? 'Scan the code on the guide' : 'Guide scanned'}</b>
-            {box.guide.scannedAt === null ? (
-              <>
-                It reads <span className="font-figures">{box.guide.code}</span>
-              </>
-            ) : (
-              `at ${showClock(box.guide.scannedAt)}, right for this box`
-            )}
+            {box.guide.scannedAt === null
+              ? 'It stands at the foot of the cover, under the square.'
+              : `at ${showClock(box.guide.scannedAt)}, right for this box`}
           </span>
         </li>
         <WeighForm

@@ -65,21 +65,21 @@ function Stop({ stop }: { stop: PickStop }) {
         {stop.items.map((item) => (
           <li
             key={item.lotCode}
-            className="grid items-center gap-x-5 gap-y-1 sm:grid-cols-[72px_minmax(0,1fr)_11rem_minmax(0,1.2fr)]"
+            className="grid grid-cols-[72px_minmax(0,1fr)] items-center gap-x-5 gap-y-1 sm:grid-cols-[72px_minmax(0,1fr)_11rem_minmax(0,1.2fr)]"
           >
             <PartPicture family={item.family} width={72} />
             <span className="leading-6">
               <b className="block text-[20px]">{item.name}</b>
               <span className="font-figures">{item.partCode}</span>, lot <b className="font-figures">{item.lotCode}</b>
             </span>
-            <b className="font-figures text-[26px] leading-8">
+            <b className="font-figures text-[26px] leading-8 max-sm:col-start-2">
               {item.amount.split(', ').map((part) => (
                 <span key={part} className="block whitespace-nowrap">
                   {part}
                 </span>
               ))}
             </b>
-            <span className="text-body">
+            <span className="text-body max-sm:col-start-2">
               {item.boxes.map((box) => `${box.amount} for ${box.orderNumber} box ${box.position}`).join(', ')}
             </span>
           </li>

@@ -15,17 +15,17 @@ const all = doors.map((door) => door.href);
 export function ShopBar({ actor, inBasket = 0 }: { actor: Actor; inBasket?: number }) {
   return (
     <header className="border-b border-rule bg-paper">
-      <div className="mx-auto flex min-h-18 max-w-page flex-wrap items-center gap-x-6 px-4 sm:px-6">
+      <div className="mx-auto flex min-h-18 max-w-page flex-wrap items-center gap-x-6 px-4 max-md:pt-3 sm:px-6">
         <Link href="/">
           <Wordmark />
         </Link>
-        <nav aria-label="Shop" className="order-last flex basis-full self-stretch md:order-none md:basis-auto">
+        <nav aria-label="Shop" className="order-last flex basis-full gap-7 self-stretch md:order-none md:basis-auto">
           {doors.map((door) => (
             <NavLink
               key={door.href}
               href={door.href}
               all={all}
-              className="inline-flex min-h-target items-center border-b-4 border-transparent pr-6 font-semibold md:min-h-18"
+              className="inline-flex min-h-target items-center border-b-4 border-transparent font-semibold md:min-h-18"
               here="border-b-copper!"
             >
               {door.label}

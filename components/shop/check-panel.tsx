@@ -4,6 +4,7 @@ import { Disclosure } from '@/components/ui/disclosure';
 import type { KitPage } from '@/services/catalogue/schemas';
 import { grouped } from '@/services/quantity';
 import { showDate } from '@/services/time';
+import { shownEdge } from '@/templates/drawings/reach-axis';
 import { kHz } from './words';
 
 /** How this version was checked: the edges, the tried boxes, the notes with their reasons, and who signed. */
@@ -11,8 +12,8 @@ export function CheckPanel({ kit }: { kit: KitPage }) {
   const { check, reach } = kit;
   if (!check || !reach) return null;
   const rows = [
-    { edge: `Low end, ${kHz(reach.band.lo)} asked`, worst: kHz(reach.worst.lo), nominal: kHz(reach.nominal.lo) },
-    { edge: `High end, ${kHz(reach.band.hi)} asked`, worst: kHz(reach.worst.hi), nominal: kHz(reach.nominal.hi) },
+    { edge: `Low end, ${shownEdge(reach.band.lo)} asked`, worst: kHz(reach.worst.lo), nominal: kHz(reach.nominal.lo) },
+    { edge: `High end, ${shownEdge(reach.band.hi)} asked`, worst: kHz(reach.worst.hi), nominal: kHz(reach.nominal.hi) },
   ];
   const notes = check.findings.filter((finding) => finding.severity === 'note');
   return (

@@ -19,11 +19,14 @@ const variants: Record<ButtonVariant, string> = {
 };
 
 const sizes: Record<ButtonSize, string> = {
-  desk: 'min-h-target px-5 text-body',
-  floor: 'min-h-floor px-6 text-[19px] border-2',
-  big: 'min-h-14 px-6.5 text-floor',
-  small: 'min-h-8.5 px-3 text-caption before:absolute before:-inset-y-1.5 before:inset-x-0',
+  desk: 'min-h-target text-body',
+  floor: 'min-h-floor text-[19px] border-2',
+  big: 'min-h-14 text-floor',
+  small: 'min-h-8.5 text-caption before:absolute before:-inset-y-1.5 before:inset-x-0',
 };
+
+/** Inside left and right. A quiet one has none to see, so that its words stand flush with what is above them. */
+const insides: Record<ButtonSize, string> = { desk: 'px-5', floor: 'px-6', big: 'px-6.5', small: 'px-3' };
 
 const locked = 'border-dashed border-edge bg-well text-ink2';
 
@@ -34,6 +37,6 @@ export function buttonLook(options: {
   className?: string | undefined;
 }): string {
   const { variant, size, isLocked = false, className } = options;
-  const quietSize = variant === 'quiet' && size !== 'floor' ? 'px-1' : '';
-  return classes(base, sizes[size], quietSize, isLocked ? classes(locked, 'shrink-0') : variants[variant], className);
+  const inside = variant === 'quiet' && size !== 'floor' ? 'px-1 -mx-1' : insides[size];
+  return classes(base, sizes[size], inside, isLocked ? classes(locked, 'shrink-0') : variants[variant], className);
 }

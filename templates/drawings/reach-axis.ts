@@ -89,6 +89,11 @@ export function shownKHz(hertz: number): string {
   return String(Math.round(hertz / KILO));
 }
 
+/** The edge of a band as the plan of bands gives it: 526.5, 1602. A reach is rounded, what is asked is not. */
+export function shownEdge(hertz: number): string {
+  return String(Math.round(hertz / 100) / 10);
+}
+
 /** A difference in kilohertz; one that rounds to nothing is still said. */
 export function shownDifference(hertz: number): string {
   const whole = Math.round(hertz / KILO);

@@ -1,4 +1,14 @@
-import { axisFor, pinFit, place, shortfall, shownDifference, shownKHz, type Axis, type ReachView } from './reach-axis';
+import {
+  axisFor,
+  pinFit,
+  place,
+  shortfall,
+  shownDifference,
+  shownEdge,
+  shownKHz,
+  type Axis,
+  type ReachView,
+} from './reach-axis';
 import { contourPath, railLayouts } from './reach-layout';
 import { reachSentence } from './reach-sentence';
 import { at, circle, line, path, rect, words, type Drawing, type Shape } from './shapes';
@@ -32,9 +42,9 @@ export function reachRailDrawing(view: ReachView, width: number): Drawing {
   if (ends) {
     const lowWords =
       short.low > 0
-        ? `band ${shownKHz(view.band.lo)}, short by ${shownDifference(short.low)}`
-        : `band ${shownKHz(view.band.lo)}`;
-    const highWords = `${short.high > 0 ? `short by ${shownDifference(short.high)}, ` : ''}${shownKHz(view.band.hi)} kHz`;
+        ? `band ${shownEdge(view.band.lo)}, short by ${shownDifference(short.low)}`
+        : `band ${shownEdge(view.band.lo)}`;
+    const highWords = `${short.high > 0 ? `short by ${shownDifference(short.high)}, ` : ''}${shownEdge(view.band.hi)} kHz`;
     shapes.push(
       words(low, ends.at, lowWords, { size: 11, bold: true }),
       words(high, ends.at, highWords, { size: 11, anchor: 'end', bold: true }),

@@ -1,8 +1,17 @@
-import { pinFit, shortfall, shownDifference, shownKHz, type PinFit, type ReachView, type Span } from './reach-axis';
+import {
+  pinFit,
+  shortfall,
+  shownDifference,
+  shownEdge,
+  shownKHz,
+  type PinFit,
+  type ReachView,
+  type Span,
+} from './reach-axis';
 
 /** The whole rail as one text for readers: band, nominal, worst case, and what is missing. */
 export function reachSentence(view: ReachView): string {
-  const band = `Band ${range(view.band)} kHz.`;
+  const band = `Band ${shownEdge(view.band.lo)} to ${shownEdge(view.band.hi)} kHz.`;
   if (!view.nominal) return `${band} No reach: this set tunes nothing.`;
   if (!view.worst) return `${band} Nominal ${range(view.nominal)} kHz. Worst case is not worked out yet.`;
   return `${band} Nominal ${range(view.nominal)}, worst case ${range(view.worst)}. ${shortWords(view)}`;

@@ -1,4 +1,5 @@
 import type { Metadata } from 'next';
+import { cache } from 'react';
 import { view } from '@/app/view';
 import { QueueList } from '@/components/check/queue-list';
 import { CheckSheet } from '@/components/check/sheet';
@@ -6,15 +7,27 @@ import { can } from '@/services/access';
 import { readQueue, readSheet } from '@/services/check';
 import { hold, release, withdraw } from '../actions';
 
-export const metadata: Metadata = { title: 'Check sheet' };
+interface Props {
+  params: Promise<{ versionId: string }>;
+}
 
-export default async function SheetPage({ params }: { params: Promise<{ versionId: string }> }) {
-  const { versionId } = await params;
-  const { sheet, queue, mayWithdraw } = await view(async (actor) => ({
+/** Once a request, for the title and the page. */
+const load = cache((versionId: string) =>
+  view(async (actor) => ({
     sheet: await readSheet(actor, versionId),
     queue: can(actor, 'version.check') ? await readQueue(actor) : { waiting: [], held: [] },
     mayWithdraw: can(actor, 'version.withdraw'),
-  }));
+  })),
+);
+
+export async function generateMetadata({ params }: Props): Promise<Metadata> {
+  const { sheet } = await load((await params).versionId);
+  const { kit } = sheet.content;
+  return { title: `${kit.name} ${kit.number} ${sheet.letter}, check sheet` };
+}
+
+export default async function SheetPage({ params }: Props) {
+  const { sheet, queue, mayWithdraw } = await load((await params).versionId);
   return (
     <main id="main" className="md:grid md:min-h-[calc(100dvh-60px)] md:grid-cols-[284px_minmax(0,1fr)]">
       <QueueList queue={queue} current={sheet.versionId} />

@@ -33,6 +33,12 @@ export default async function TracePage({ searchParams }: Props) {
     <main id="main" className="grid gap-8 px-4 py-6 sm:px-7">
       <TraceSearch code={code} problem={found.sentence} />
       {found.lot && <LotTraceView trace={found.lot} />}
+      {code === '' && (
+        <ul className="grid max-w-measure gap-2 border-t-2 border-ink pt-4">
+          <li>A box leads to its version, to who signed it, and to every lot that went into it.</li>
+          <li>A lot leads to every box it went into, and to who has that box now.</li>
+        </ul>
+      )}
     </main>
   );
 }

@@ -1,4 +1,5 @@
 import type { Metadata } from 'next';
+import { cache } from 'react';
 import { view } from '@/app/view';
 import { Plate } from '@/components/devices/plate';
 import { WindingMark } from '@/components/devices/winding-mark';
@@ -20,15 +21,16 @@ interface Props {
   params: Promise<{ code: string }>;
 }
 
+/** Once a request, for the title and the page. */
+const load = cache((code: string) => view((actor) => readKitPage(actor, code)));
+
 export async function generateMetadata({ params }: Props): Promise<Metadata> {
-  const { code } = await params;
-  const kit = await view((actor) => readKitPage(actor, code));
+  const kit = await load((await params).code);
   return { title: `${kit.name}, No. ${kit.number}`, description: kit.summary };
 }
 
 export default async function KitPage({ params }: Props) {
-  const { code } = await params;
-  const kit = await view((actor) => readKitPage(actor, code));
+  const kit = await load((await params).code);
   return (
     <main id="main">
       <div className="mx-auto max-w-page px-4 sm:px-6">

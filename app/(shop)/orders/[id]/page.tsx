@@ -1,4 +1,6 @@
 import type { Metadata } from 'next';
+import { notFound } from 'next/navigation';
+import { cache } from 'react';
 import { view } from '@/app/view';
 import { BeforeItComes } from '@/components/shop/before-it-comes';
 import { OrderActions } from '@/components/shop/order-actions';
@@ -8,23 +10,35 @@ import { OrderSums } from '@/components/shop/order-sums';
 import { OrderTimeline } from '@/components/shop/order-timeline';
 import { readOrder } from '@/services/orders';
 import { OrderRef } from '@/services/orders/schemas';
-import { notFound } from 'next/navigation';
 import { cancelIt, claimIt, pay } from '../../actions';
-
-export const metadata: Metadata = { title: 'Your order' };
 
 interface Props {
   params: Promise<{ id: string }>;
   searchParams: Promise<Record<string, string | string[] | undefined>>;
 }
 
-export default async function OrderPage({ params, searchParams }: Props) {
+async function refOf({ params, searchParams }: Props): Promise<OrderRef> {
   const { id } = await params;
-  const { key, back } = await searchParams;
+  const { key } = await searchParams;
   const asked = OrderRef.safeParse({ orderId: id, ...(typeof key === 'string' && { key }) });
-  if (!asked.success) notFound();
-  const ref = asked.data;
-  const order = await view((actor) => readOrder(actor, ref));
+  return asked.success ? asked.data : notFound();
+}
+
+/** Once a request, for the title and the page. */
+const load = cache((orderId: OrderRef['orderId'], key: string | undefined) =>
+  view((actor) => readOrder(actor, { orderId, ...(key !== undefined && { key }) })),
+);
+
+export async function generateMetadata(props: Props): Promise<Metadata> {
+  const { orderId, key } = await refOf(props);
+  const order = await load(orderId, key);
+  return { title: order.number === null ? 'Your order' : `Order ${order.number}` };
+}
+
+export default async function OrderPage(props: Props) {
+  const ref = await refOf(props);
+  const { back } = await props.searchParams;
+  const order = await load(ref.orderId, ref.key);
   const boxes = order.lines.reduce((all, line) => all + line.quantity, 0);
   const keyQuery = ref.key === undefined ? '' : `?key=${encodeURIComponent(ref.key)}`;
   return (

@@ -1,4 +1,5 @@
 import type { Metadata } from 'next';
+import { cache } from 'react';
 import { view } from '@/app/view';
 import { PartForm } from '@/components/bench/part-form';
 import { PartSheet } from '@/components/bench/part-sheet';
@@ -9,14 +10,25 @@ import { can } from '@/services/access';
 import { readPart, readUse } from '@/services/parts';
 import { changePart, retirePart } from '../../actions';
 
-export const metadata: Metadata = { title: 'Part' };
+interface Props {
+  params: Promise<{ id: string }>;
+}
 
-export default async function PartPage({ params }: { params: Promise<{ id: string }> }) {
-  const { id } = await params;
-  const { part, uses, mayEdit } = await view(async (actor) => {
+/** Once a request, for the title and the page. */
+const load = cache((id: string) =>
+  view(async (actor) => {
     const found = await readPart(actor, id);
     return { part: found, uses: await readUse(actor, found.id), mayEdit: can(actor, 'part.edit') };
-  });
+  }),
+);
+
+export async function generateMetadata({ params }: Props): Promise<Metadata> {
+  const { part } = await load((await params).id);
+  return { title: `${part.code}, part` };
+}
+
+export default async function PartPage({ params }: Props) {
+  const { part, uses, mayEdit } = await load((await params).id);
   return (
     <main id="main" className="mx-auto max-w-desk px-4 py-6 sm:px-6">
       <Breadcrumbs trail={[{ label: 'Parts', href: '/bench/parts' }]} here={part.code} />

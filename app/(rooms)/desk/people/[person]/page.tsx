@@ -1,4 +1,5 @@
 import type { Metadata } from 'next';
+import { cache } from 'react';
 import { view } from '@/app/view';
 import { NewWayInForm } from '@/components/account/new-way-in-form';
 import { RolesForm } from '@/components/account/roles-form';
@@ -8,11 +9,20 @@ import { Panel } from '@/components/ui/panel';
 import { readStaff } from '@/services/people';
 import { changeRoles, sendNewWayIn } from '../actions';
 
-export const metadata: Metadata = { title: 'Roles' };
+interface Props {
+  params: Promise<{ person: string }>;
+}
 
-export default async function PersonPage({ params }: { params: Promise<{ person: string }> }) {
-  const { person: personId } = await params;
-  const { person, needsCode } = await view((actor) => readStaff(actor, personId));
+/** Once a request, for the title and the page. */
+const load = cache((personId: string) => view((actor) => readStaff(actor, personId)));
+
+export async function generateMetadata({ params }: Props): Promise<Metadata> {
+  const { person } = await load((await params).person);
+  return { title: `${person.name}, people` };
+}
+
+export default async function PersonPage({ params }: Props) {
+  const { person, needsCode } = await load((await params).person);
   return (
     <main id="main" className="mx-auto max-w-desk px-4 py-8 sm:px-6">
       <Breadcrumbs trail={[{ label: 'People', href: '/desk/people' }]} here={person.name} />
