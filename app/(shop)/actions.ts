@@ -4,15 +4,18 @@ import { action } from '@/app/action';
 import type { Action } from '@/components/forms/action-result';
 import type { CheckoutInput } from '@/components/shop/checkout-form';
 import { addToBasket, changeBasket, claimOrder, placeOrder } from '@/services/orders';
-import type { BasketView, ChangeBasket, OrderRef, OrderView } from '@/services/orders/schemas';
+import type { BasketView, ChangeBasket, OrderRef, OrderView, PlaceOrder } from '@/services/orders/schemas';
 import { cancelOrder, startCheckout } from '@/services/payments';
+import { currentAddress } from '@/services/people';
 import { basketId, basketIdForWriting } from './basket-cookie';
 
 type Line = Omit<ChangeBasket, 'basketId'>;
 
 const add = action(addToBasket, { refresh: ['/basket'] });
 const change = action(changeBasket, { refresh: ['/basket'] });
-const place = action(placeOrder, { refresh: ['/basket'] });
+const place = action(async (actor, form: PlaceOrder) => placeOrder(actor, form, await currentAddress()), {
+  refresh: ['/basket'],
+});
 const start = action(startCheckout);
 const cancel = action(cancelOrder, { refresh: ['/orders/[id]', '/orders', '/desk/orders'] });
 const claim = action(claimOrder, { refresh: ['/orders/[id]', '/orders'] });

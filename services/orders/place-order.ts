@@ -4,6 +4,7 @@ import { shopCurrency } from '../catalogue/rules';
 import { type OrderId, OrderId as OrderIdSchema, newId } from '../ids';
 import { readFrozen } from '../kits';
 import { type Money, sum, taxWithin, times } from '../money';
+import { countOrder } from '../people';
 import { parse, refused } from '../problem';
 import { type Tx, record, sha256, write } from '../record';
 import { buildable, lapseDue, needsOf, reserve } from '../stock';
@@ -21,13 +22,19 @@ const firstNumber = 4001;
 
 /**
  * Makes the basket an order and sets its stock aside, in one write: all of it or none. Refused when a kit is no longer
- * sold, when the store cannot make that many, or when nothing serves the address.
+ * sold, when the store cannot make that many, or when nothing serves the address; with a wait, when too many orders came
+ * from one network address.
  */
-export async function placeOrder(actor: Actor, input: PlaceOrder): Promise<{ orderId: OrderId; key: string }> {
+export async function placeOrder(
+  actor: Actor,
+  input: PlaceOrder,
+  from: string | null = null,
+): Promise<{ orderId: OrderId; key: string }> {
   must(actor, 'order.place');
   const order = parse(PlaceOrder, input);
 
   return write(actor, async (tx) => {
+    if (from !== null) await countOrder(tx, from);
     const basket = await basketLines(tx.sql, order.basketId);
     if (basket.length === 0) throw refused('Your basket is empty. Put a kit into it first.');
     const delivery = deliveriesTo(await rows.deliveries(tx.sql), order.address.country).find(

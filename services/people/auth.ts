@@ -107,7 +107,7 @@ const providers = () => [
   provider('password', ['email', 'password', 'code'], async ({ email = '', password = '', code = '' }) => {
     const jar = await cookies();
     const device = jar.get(cookieName('device'))?.value ?? null;
-    const origin = { address: await addressOf(), device };
+    const origin = { address: await currentAddress(), device };
     const { personId } = await signInWithPassword(visitor, { email, password, code }, origin);
     jar.set(cookieName('device'), deviceMark(personId), { ...cookieOptions(), maxAge: days(365) / 1000 });
     return personId;
@@ -175,11 +175,11 @@ export async function currentVisit(): Promise<Visit> {
   const jar = await cookies();
   const browser = jar.get(cookieName('browser'))?.value ?? newToken();
   jar.set(cookieName('browser'), browser, { ...cookieOptions(), maxAge: days(1) / 1000 });
-  return { browser, address: await addressOf() };
+  return { browser, address: await currentAddress() };
 }
 
 /** The nearest proxy writes the last entry; earlier ones come from the caller and prove nothing. */
-async function addressOf(): Promise<string> {
+export async function currentAddress(): Promise<string> {
   const chain = (await headers()).get('x-forwarded-for') ?? '';
   return chain.split(',').at(-1)?.trim().slice(0, 200) || 'unknown';
 }

@@ -98,6 +98,7 @@ export const allowance = {
   signInFromAddress: { most: 100, window: minutes(15) },
   linkForAccount: { most: 5, window: minutes(60) },
   linkFromAddress: { most: 20, window: minutes(60) },
+  orderFromAddress: { most: 30, window: minutes(60) },
 } as const;
 
 export const windowOf = (at: Instant, window: number) => Math.floor(at / window);

@@ -2,6 +2,7 @@ import { beforeAll, describe, expect, it } from 'vitest';
 import { type Actor, systemActor, visitor } from '@/services/access';
 import { newId } from '@/services/ids';
 import {
+  cancel,
   changeBasket,
   claimOrder,
   listMyOrders,
@@ -100,6 +101,19 @@ describe('placing an order', () => {
     const basketId = await basket();
     await placeOrder(visitor, form(basketId));
     await expect(placeOrder(visitor, form(basketId))).rejects.toThrow('basket is empty');
+  });
+
+  it('has to wait when one network address sets stock aside again and again; refused orders do not count', async () => {
+    const from = '192.0.2.7';
+    await expect(placeOrder(visitor, form(newId()), from)).rejects.toThrow('basket is empty');
+    for (let n = 0; n < 30; n++) {
+      const ref = await placeOrder(visitor, form(await basket()), from);
+      await write(systemActor('stripe'), (tx) => cancel(tx, ref.orderId));
+    }
+    const basketId = await basket();
+    await expect(placeOrder(visitor, form(basketId), from)).rejects.toMatchObject({ kind: 'busy' });
+    expect((await readBasket(visitor, basketId)).count).toBe(1);
+    await expect(placeOrder(visitor, form(basketId), '192.0.2.8')).resolves.toBeTruthy();
   });
 
   it('keeps the price it was placed at, with the tax of the country it goes to', async () => {
