@@ -4,6 +4,7 @@ import { record, write } from '../record';
 import { findLot, takeOut } from '../stock';
 import { BlockLot } from '../stock/schemas';
 import { tellOfShortage } from './mark-paid';
+import { lookAt } from './look-at';
 import * as rows from './rows';
 import { fulfilmentMayBecome } from './rules';
 
@@ -23,7 +24,7 @@ export async function blockLot(actor: Actor, input: BlockLot): Promise<{ waiting
     for (const orderId of unallocated) {
       const order = await rows.getOrder(tx.sql, orderId);
       if (!fulfilmentMayBecome(order.fulfilment, 'backordered')) {
-        await rows.lookAt(tx.sql, orderId, `Lot ${lot.code} was blocked while this order was being packed.`);
+        await lookAt(tx, orderId, `Lot ${lot.code} was blocked while this order was being packed.`);
         continue;
       }
       await rows.moveOrder(tx.sql, order, { fulfilment: 'backordered' });

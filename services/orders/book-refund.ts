@@ -3,6 +3,7 @@ import { newId } from '../ids';
 import { type Money, money } from '../money';
 import { type Tx, record } from '../record';
 import { giveBack } from '../stock';
+import { lookAt } from './look-at';
 import * as rows from './rows';
 import { fulfilmentMayBecome, paymentAfter } from './rules';
 
@@ -20,7 +21,7 @@ export async function bookRefund(tx: Tx, { orderId, charge, total }: Refunded): 
   const order = await rows.findOrder(tx.sql, orderId);
   if (!order) return;
   if (total.currency !== order.currency) {
-    await rows.lookAt(tx.sql, orderId, `A refund in ${total.currency} came in for an order in ${order.currency}.`);
+    await lookAt(tx, orderId, `A refund in ${total.currency} came in for an order in ${order.currency}.`);
     return;
   }
   const booked = await rows.refundedOfCharge(tx.sql, orderId, charge);
@@ -47,7 +48,7 @@ export async function settleRefunds(tx: Tx, orderId: string): Promise<void> {
   if (stops) await giveBack(tx, orderId, 'given-back');
   await rows.moveOrder(tx.sql, order, { payment, fulfilment });
   if (payment === 'refunded' && (fulfilment === 'picking' || fulfilment === 'packed')) {
-    await rows.lookAt(tx.sql, orderId, 'Paid back in full while it was being packed. Stop the boxes.');
+    await lookAt(tx, orderId, 'Paid back in full while it was being packed. Stop the boxes.');
   }
   await record(tx, 'order.settled', {
     subject: { kind: 'order', id: orderId },

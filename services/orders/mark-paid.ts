@@ -6,6 +6,7 @@ import { type Tx, record } from '../record';
 import { allocate } from '../stock';
 import { numberInvoice } from './number-invoice';
 import { settleRefunds } from './book-refund';
+import { lookAt } from './look-at';
 import * as rows from './rows';
 
 export interface PaidSession {
@@ -25,20 +26,18 @@ export async function markPaid(tx: Tx, { orderId, reference, amount }: PaidSessi
   const order = await rows.findOrder(tx.sql, orderId);
   if (!order) return;
   if (amount.minor !== order.total.minor || amount.currency !== order.total.currency) {
-    const isNews = await rows.lookAt(
-      tx.sql,
+    await lookAt(
+      tx,
       orderId,
       `A payment of ${formatMoney(amount)} came in, but the order is for ${formatMoney(order.total)}. Compare ${reference} with the provider's list.`,
     );
-    const subject = { kind: 'order', id: orderId };
-    if (isNews) await record(tx, 'order.paid-otherwise', { subject, after: { reference, amount } });
     return;
   }
   if (!(await rows.bookMoney(tx.sql, { id: newId(), orderId, kind: 'paid', amount, reference, at: tx.now }))) return;
 
   if (order.payment !== 'awaiting-payment') {
     const why = order.payment === 'cancelled' ? 'after it was cancelled' : 'a second time';
-    await rows.lookAt(tx.sql, orderId, `Paid ${why}. Refund ${formatMoney(amount)}, payment ${reference}.`);
+    await lookAt(tx, orderId, `Paid ${why}. Refund ${formatMoney(amount)}, payment ${reference}.`);
     await record(tx, 'order.paid-again', { subject: { kind: 'order', id: orderId }, after: { reference, amount } });
     return;
   }
@@ -58,5 +57,5 @@ export async function markPaid(tx: Tx, { orderId, reference, amount }: PaidSessi
 /** The buyer by mail, the owner on the desk: paid, and the stock had gone. */
 export async function tellOfShortage(tx: Tx, orderId: string): Promise<void> {
   await mail.queue(tx, 'order-backordered', { orderId }, orderId);
-  await rows.lookAt(tx.sql, orderId, 'Paid, but the store is short of a part. Buy it in, or refund.');
+  await lookAt(tx, orderId, 'Paid, but the store is short of a part. Buy it in, or refund.');
 }

@@ -149,7 +149,7 @@ export async function moveOrder(
 }
 
 /** Adds a sentence for whoever has to look at the order; false when it stands there already. */
-export async function lookAt(sql: Knex.Transaction, orderId: string, sentence: string): Promise<boolean> {
+export async function addToLookAt(sql: Knex.Transaction, orderId: string, sentence: string): Promise<boolean> {
   const row = await sql('orders')
     .where({ id: orderId })
     .select({ said: 'look_at_it' })

@@ -79,6 +79,12 @@ export function timelineOf(facts: Facts): Stage[] {
 /** The sentence that heads an order's page, and the one under it. */
 export function headlineOf(facts: Facts): { headline: string; lead: string } {
   const { payment, fulfilment, promise } = facts;
+  if (payment === 'refunded' && fulfilment !== 'cancelled') {
+    return {
+      headline: 'Paid back.',
+      lead: 'The whole of it is on its way to the card it came from. Banks take up to ten days.',
+    };
+  }
   if (payment === 'refunded') {
     return {
       headline: 'Cancelled, and paid back.',

@@ -40,7 +40,7 @@ export async function applyEvent(tx: Tx, event: Stripe.Event, orderId: string | 
     }
     case 'charge.dispute.created':
       if (orderId)
-        await lookAt(tx.sql, orderId, 'The buyer disputes the payment at the bank. Answer the provider in time.');
+        await lookAt(tx, orderId, 'The buyer disputes the payment at the bank. Answer the provider in time.');
       return;
     case 'payment_intent.payment_failed':
     case 'payment_intent.succeeded':
@@ -65,7 +65,7 @@ export async function applySession(
   const reference = idOf(session.payment_intent);
   if (!amount || reference === null) {
     await lookAt(
-      tx.sql,
+      tx,
       orderId,
       `Payment page ${session.id} is complete, but says no amount. Compare it with the provider's list.`,
     );

@@ -47,12 +47,14 @@ export async function write<T>(actor: Actor, change: (tx: Tx) => Promise<T>): Pr
     } catch (error) {
       if (!isBusy(error)) throw translate(error);
       if (attempt === attempts) {
-        throw new Problem('busy', 'The yard is busy just now. Nothing was lost; try again in a moment.');
+        throw busy();
       }
       await new Promise((resolve) => setTimeout(resolve, 20 * attempt + Math.floor(Math.random() * 40)));
     }
   }
 }
+
+const busy = () => new Problem('busy', 'The yard is busy just now. Nothing was lost; try again in a moment.');
 
 export interface Subject {
   kind: string;
@@ -97,6 +99,8 @@ const isBusy = (error: unknown) => codeOf(error).startsWith('SQLITE_BUSY');
 /** Driver codes that mean something to a reader; what a rule should have caught stays an error of ours. */
 function translate(error: unknown): unknown {
   const code = codeOf(error);
+  // The one connection was not free in time: many ask at once, or somebody holds it.
+  if (error instanceof Error && error.name === 'KnexTimeoutError') return busy();
   if (code === 'SQLITE_FULL' || code.startsWith('SQLITE_IOERR')) {
     return new Problem(
       'unavailable',

@@ -159,7 +159,7 @@ describe('one paid checkout', () => {
       expect(outcome).toMatchObject({ payment: 'awaiting-payment', paidRows: 0, invoices: 0, mails: [] });
       expect(outcome.look_at_it).toContain('Compare');
       await deliver(event('checkout.session.completed', session({ orderId, amount, ...wrong })));
-      const lines = await reading()('changes').where({ subject_id: orderId, action: 'order.paid-otherwise' });
+      const lines = await reading()('changes').where({ subject_id: orderId, action: 'order.to-look-at' });
       expect(lines).toHaveLength(1);
     }
     const stranger = event('checkout.session.completed', session({ orderId: newId(), amount: 4250 }));

@@ -69,6 +69,7 @@ describe('states of an order', () => {
       for (const fulfilment of FulfilmentState.options) {
         const { headline, lead } = headlineOf({ ...facts, payment, fulfilment });
         expect(`${headline} ${lead}`).toMatch(/^[A-Z].*\.$/);
+        expect(headline.startsWith('Cancelled')).toBe(fulfilment === 'cancelled');
       }
     }
   });
