@@ -38,9 +38,13 @@ async function main() {
   const begun = Date.now();
   checkNode();
   process.env.CHROMIUM = findChromium();
-  for (const [tool, pack] of [['pdftotext', 'poppler-utils']]) {
+  for (const [tool, pack, what] of [
+    ['pdftotext', 'poppler-utils', 'printed papers'],
+    ['ngspice', 'ngspice', "the receiver's network"],
+    ['nec2c', 'nec2c', 'the aerial'],
+  ]) {
     if (!existsSync(`/usr/bin/${tool}`)) {
-      throw new Stop(`The tests of printed papers need ${tool}. Install it (Debian: apt-get install ${pack}).`);
+      throw new Stop(`The tests of ${what} need ${tool}. Install it (Debian: apt-get install ${pack}).`);
     }
   }
   mkdirSync(join(root, 'test/artefacts'), { recursive: true });
