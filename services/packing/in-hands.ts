@@ -6,9 +6,10 @@ import { takenSentence, barOf } from './rules';
 
 /**
  * A step: the box, when the acting packer has it in hand; each thing done keeps the claim alive. Refused for a closed
- * box, for a box that somebody else took over, and for a version that may no longer be packed.
+ * box, for a box that somebody else took over, and for a version or an order that may no longer be packed.
+ * @param emptying what is done takes something out, which such a box needs
  */
-export async function boxInHands(tx: Tx, boxId: string): Promise<BoxRow> {
+export async function boxInHands(tx: Tx, boxId: string, { emptying = false } = {}): Promise<BoxRow> {
   const box = await getBox(tx.sql, boxId);
   const personId = personIdOf(tx.actor);
   if (box.state === 'closed' || box.state === 'shipped') {
@@ -22,6 +23,6 @@ export async function boxInHands(tx: Tx, boxId: string): Promise<BoxRow> {
     );
   }
   const bar = barOf(box);
-  if (bar !== '') throw refused(bar);
+  if (bar !== '' && !emptying) throw refused(bar);
   return box;
 }

@@ -18,7 +18,7 @@ export async function putBack(actor: Actor, input: PutBack): Promise<BoxView> {
   const { boxId, lineId } = parse(PutBack, input);
 
   return write(actor, async (tx) => {
-    const box = await boxInHands(tx, boxId);
+    const box = await boxInHands(tx, boxId, { emptying: true });
     const line = (await linesOf(tx.sql, [boxId])).find((one) => one.id === lineId);
     const lying = (await inBox(tx.sql, boxId)).filter((one) => one.lineId === lineId);
     const last = lying.find((one) => one.lotState !== 'accepted') ?? lying[0];

@@ -324,10 +324,15 @@ describe('guide, slip, scale and lid', () => {
     const { boxIds } = await newBoxes(1, going);
     const boxId = boxIds[0] ?? failed();
     await claimBox(packer, { boxId });
+    await scan(packer, { boxId, code: label('BOARD-B') });
     await reading()('versions').where('id', going.versionId).update({ state: 'withdrawn' });
     await expect(scan(packer, { boxId, code: label('GER-11') })).rejects.toThrow(/Version 73 F was withdrawn/);
     await expect(closeBox(packer, { boxId })).rejects.toThrow(/Version 73 F was withdrawn/);
     expect((await readBox(packer, boxId)).reasons[0]).toContain('withdrawn');
+    const place = (await readBox(packer, boxId)).places.find((one) => one.packed > 0);
+    expect(place).toBeDefined();
+    const box = await putBack(packer, { boxId, lineId: place?.lineId ?? failed() });
+    expect(box.pieces.packed).toBe(0);
   });
 });
 
