@@ -34,15 +34,28 @@ export function elliptic(square: number, complement: number, into: Elliptic): vo
   into.second = into.first * (1 - sum);
 }
 
-/** Nagaoka's coefficient, exact (1e-9 against the loop integral). @see coils-and-capacitors.md A1 */
+/** Integrals of the modulus k = D / root of (D squared + l squared), for a coil of that diameter and length. */
+function ofCoil(diameter: Metre, length: Metre): Elliptic {
+  const sum = diameter * diameter + length * length;
+  const e: Elliptic = { first: 0, second: 0 };
+  elliptic((diameter * diameter) / sum, length / Math.sqrt(sum), e);
+  return e;
+}
+
+/**
+ * Nagaoka's coefficient, exact for any shape (1e-9 against the loop integral and SciPy; 1e-10 at l/D 0.001, where digits
+ * cancel). @see coils-and-capacitors.md A1
+ */
 export function nagaoka(diameter: Metre, length: Metre): number {
   positive('diameter', diameter);
   positive('length', length);
+  return coefficient(diameter, length, ofCoil(diameter, length));
+}
+
+function coefficient(diameter: Metre, length: Metre, e: Elliptic): number {
   const sum = diameter * diameter + length * length;
   const complement = length / Math.sqrt(sum);
   const square = (diameter * diameter) / sum;
-  const e: Elliptic = { first: 0, second: 0 };
-  elliptic(square, complement, e);
   const bracket = ((length * length) / (diameter * diameter)) * (e.first - e.second) + e.second - Math.sqrt(square);
   return (4 * bracket) / (3 * PI * complement);
 }
@@ -64,6 +77,18 @@ export function nagaokaLundin(diameter: Metre, length: Metre): number {
 export function sheetInductance(turns: number, diameter: Metre, length: Metre): Henry {
   positive('turns', turns);
   return (MU_0 * PI * turns * turns * diameter * diameter * nagaoka(diameter, length)) / (4 * length);
+}
+
+/**
+ * A current sheet and what its ends do to each other: Nagaoka's coefficient, and the mutual inductance of two circles as
+ * far apart as the coil is long, over mu0 times their radius. Both come from the same two integrals.
+ */
+export function sheetWithEnds(diameter: Metre, length: Metre): { sheet: number; ends: number } {
+  positive('diameter', diameter);
+  positive('length', length);
+  const e = ofCoil(diameter, length);
+  const k = diameter / Math.sqrt(diameter * diameter + length * length);
+  return { sheet: coefficient(diameter, length, e), ends: (2 / k - k) * e.first - (2 / k) * e.second };
 }
 
 /** Wheeler's microhenry for inches, in SI: 1e-6 over 0.0254. */
