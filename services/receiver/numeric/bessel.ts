@@ -39,7 +39,7 @@ export function besselI1Scaled(x: number): number {
 export function lnBesselI0(x: number): number {
   if (x < 0.05) {
     const z = x * x;
-    return z * (0.25 - z * (1 / 64 - z / 576));
+    return z * (0.25 - z * (1 / 64 - z * (1 / 576 - (z * 11) / 49152)));
   }
   return x + log(scaledBessel(0, x));
 }

@@ -64,9 +64,11 @@ function lowerQuantile(p: number): number {
   return z - (normalBelow(z) - p) / density(z);
 }
 
-/** Probability of Student's t above t >= 0 with `freedom` degrees. */
+/** Probability of Student's t above t >= 0 with `freedom` degrees; near zero from the other side, which keeps the digits. */
 export function studentAbove(t: number, freedom: number): number {
-  return 0.5 * betaRegularised(freedom / (freedom + t * t), freedom / 2, 0.5);
+  const square = t * t;
+  if (square < 0.5) return 0.5 - 0.5 * betaRegularised(square / (freedom + square), 0.5, freedom / 2);
+  return 0.5 * betaRegularised(freedom / (freedom + square), freedom / 2, 0.5);
 }
 
 /** The t that a tail probability p <= 1/2 lies above. */
