@@ -32,7 +32,7 @@ export function evaluate(input: DesignInput | unknown, options: EvaluateOptions 
   within('seed', seed, 0, 4294967295);
   within('boxes', boxes, 0, 200000);
   const design = parseDesign(input);
-  const figures = survey(design, { seed, boxes, rules, onProgress, depth: 'boxes' });
+  const figures = survey(design, { seed, boxes, rules, onProgress, depth: 'verdict' });
   const context = { input, seed, boxes, tried: new Map() };
   const findings = findingsOf(figures, (found, stops) => remedyFor(found, figures, context, stops));
   const stops = findings.some((finding) => finding.severity === 'stop');

@@ -19,8 +19,11 @@ import { loadAt, soundingAt } from './soundings';
 import { TWO_PI } from './units';
 import type { Verdict } from './verdict';
 
-/** Nominal figures alone, with corners and variance shares, or with the boxes as well. */
-export type SurveyDepth = 'nominal' | 'corners' | 'boxes';
+/**
+ * How far a design is worked out. A verdict takes all; `corners` leaves the boxes out; a trial of a remedy takes the
+ * nominal figures and what its finding is told from: the worst corner, other aerials, or the share of boxes.
+ */
+export type SurveyDepth = 'verdict' | 'corners' | 'nominal' | 'worst' | 'aerials' | 'share';
 
 export interface SurveyOptions {
   depth: SurveyDepth;
@@ -29,6 +32,8 @@ export interface SurveyOptions {
   boxes: number;
   rules: Rules;
   onProgress?: ((done: number, total: number) => void) | undefined;
+  /** Draws stop once more boxes than this have missed. */
+  mostMissed?: number | undefined;
 }
 
 /** A plan with the detector's load of the middle of the band, at nominal values; and the scan's frequencies. */
@@ -40,16 +45,24 @@ export interface Prepared {
 export function prepared(design: Design): Prepared {
   const plan = planOf(design);
   plan.fill(plan.nominal);
+  loaded(plan);
+  return { plan, points: scanPoints(plan) };
+}
+
+function loaded(plan: Plan): void {
+  const { design } = plan;
   const phone = earphoneCircuit(design);
   loadAt(plan, detectorFacts(design).diode, directLoad(phone) ?? OPEN, middleOf(design));
   plan.fill(plan.nominal);
-  return { plan, points: scanPoints(plan) };
 }
 
 /** Margins of the nominal reach alone. */
 export function nominalMargins(design: Design): Ends {
-  const { plan, points } = prepared(design);
-  return marginsOf(reachAsFilled(plan, plan.nominal, points), design.band);
+  const plan = planOf(design);
+  plan.fill(plan.nominal);
+  // With one node the detector's conductance lies across the tuned circuit and moves no frequency.
+  if (plan.circuit.sections > 1 || plan.circuit.primary) loaded(plan);
+  return marginsOf(reachAsFilled(plan, plan.nominal, scanPoints(plan)), design.band);
 }
 
 function aerialScaled({ plan, points }: Prepared, scale: number): Ends {
@@ -92,7 +105,9 @@ function coilOf({ plan }: Prepared): Verdict['coil'] {
 }
 
 /** Works out every figure of a design; the findings are made from them. */
-export function survey(design: Design, { seed, boxes, rules, depth, onProgress }: SurveyOptions): Figures {
+export function survey(design: Design, options: SurveyOptions): Figures {
+  const { seed, boxes, rules, depth, onProgress, mostMissed } = options;
+  const whole = depth === 'verdict' || depth === 'corners';
   const ready = prepared(design);
   const { plan, points } = ready;
   const phone = earphoneCircuit(design);
@@ -105,21 +120,21 @@ export function survey(design: Design, { seed, boxes, rules, depth, onProgress }
   const nominal = reachOf(plan, plan.nominal, points);
   const reach = {
     nominal,
-    corners: depth === 'nominal' ? nominal : cornersOf(plan, points, nominal),
-    aerialHalf: depth === 'nominal' ? nominal : aerialScaled(ready, 0.5),
-    aerialDouble: depth === 'nominal' ? nominal : aerialScaled(ready, 2),
+    corners: whole || depth === 'worst' ? cornersOf(plan, points, nominal) : nominal,
+    aerialHalf: whole || depth === 'aerials' ? aerialScaled(ready, 0.5) : nominal,
+    aerialDouble: whole || depth === 'aerials' ? aerialScaled(ready, 2) : nominal,
   };
-  const limits = depth === 'nominal' ? [] : limitsOf(plan, points);
+  const limits = whole ? limitsOf(plan, points) : [];
   const share =
-    depth !== 'boxes' || boxes === 0
-      ? null
-      : boxesOf(plan, { seed, boxes, confidence: rules.yieldConfidence, onProgress });
+    (depth === 'verdict' || depth === 'share') && boxes > 0
+      ? boxesOf(plan, { seed, boxes, confidence: rules.yieldConfidence, onProgress, mostMissed })
+      : null;
   plan.fill(plan.nominal);
   const coil = coilOf(ready);
 
   const { band } = design;
   const sound = (f: number): Sounding => {
-    const sounding = soundingAt(plan, detector.diode, dcLoad, f, { bandwidth: depth !== 'nominal' });
+    const sounding = soundingAt(plan, detector.diode, dcLoad, f, { bandwidth: whole });
     plan.fill(plan.nominal);
     return sounding;
   };

@@ -1,8 +1,8 @@
 import { capacitanceNeeded } from '../network/solve';
 import type { Plan } from '../network/plan';
-import { possible } from '../network/values';
 import { clopperPearson } from '../numeric/quantiles';
-import { samplerOf } from './draws';
+import { BLOCK, samplerOf, type Sampler } from './draws';
+import { oneNodeCounter, type Counter } from './one-node';
 
 export interface Share {
   covered: number;
@@ -16,10 +16,9 @@ export interface BoxOptions {
   boxes: number;
   confidence: number;
   onProgress?: ((done: number, total: number) => void) | undefined;
+  /** Draws stop once more boxes than this have missed: whoever asks only whether a share is reached knows enough. */
+  mostMissed?: number | undefined;
 }
-
-/** Boxes between two reports of progress. */
-const REPORT = 500;
 
 /** Whether the circuit as filled reaches both edges of the band: no root, two solves. */
 function covers(plan: Plan, x: Float64Array): boolean {
@@ -29,31 +28,46 @@ function covers(plan: Plan, x: Float64Array): boolean {
   return capacitanceNeeded(circuit, design.band.hi) >= circuit.cMin;
 }
 
+/** Boxes of any circuit form that cover, each by the solver. */
+export function generalCounter(plan: Plan, sampler: Sampler): Counter {
+  const x = Float64Array.from(plan.nominal);
+  return (count) => {
+    let covered = 0;
+    for (let box = 0; box < count; box += 1) {
+      if (sampler.possible[box] !== 1) continue;
+      sampler.row(box, x);
+      plan.fill(x);
+      if (covers(plan, x)) covered += 1;
+    }
+    return covered;
+  };
+}
+
 /** Share of simulated boxes that cover the band, with its limits: sampling noise only, not wrong assumptions. */
 export function boxesOf(plan: Plan, options: BoxOptions): Share {
-  const { seed, boxes, confidence, onProgress } = options;
+  const { seed, boxes, confidence, onProgress, mostMissed = boxes } = options;
   const { entries } = plan.values;
   const indices = plan.values.spread();
   let covered = 0;
-  const x = Float64Array.from(plan.nominal);
   if (indices.length === 0) {
-    plan.fill(x);
-    covered = covers(plan, x) ? boxes : 0;
+    plan.fill(plan.nominal);
+    covered = covers(plan, plan.nominal) ? boxes : 0;
+    onProgress?.(boxes, boxes);
   } else {
     const sampler = samplerOf(entries, indices, seed);
+    const counter = oneNodeCounter(plan, sampler, indices) ?? generalCounter(plan, sampler);
     plan.circuit.drawing = true;
-    for (let box = 0; box < boxes; box += 1) {
-      sampler.next(x);
-      if (possible(entries, x)) {
-        plan.fill(x);
-        if (covers(plan, x)) covered += 1;
-      }
-      if (onProgress !== undefined && (box + 1) % REPORT === 0) onProgress(box + 1, boxes);
+    let done = 0;
+    while (done < boxes && done - covered <= mostMissed) {
+      const count = Math.min(BLOCK, boxes - done);
+      sampler.draw(count);
+      covered += counter(count);
+      done += count;
+      onProgress?.(done, boxes);
     }
     plan.circuit.drawing = false;
     plan.fill(plan.nominal);
   }
-  if (onProgress !== undefined && (boxes % REPORT !== 0 || indices.length === 0)) onProgress(boxes, boxes);
   const { low, high } = clopperPearson(covered, boxes, confidence);
   return { covered, boxes, low, high };
 }

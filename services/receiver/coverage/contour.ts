@@ -1,11 +1,10 @@
 import { within } from '../invalid-input';
 import { capacitanceNeeded } from '../network/solve';
-import { possible } from '../network/values';
 import { exp, log } from '../numeric/exp-log';
 import { parseDesign } from '../parse';
 import { prepared } from '../survey';
 import type { Hertz } from '../units';
-import { samplerOf } from './draws';
+import { BLOCK, samplerOf } from './draws';
 
 export interface ContourOptions {
   seed?: number | undefined;
@@ -37,8 +36,9 @@ export function contour(input: unknown, { seed = 1, boxes = 2000, points = 61 }:
   const floor = new Uint8Array(points);
   circuit.drawing = true;
   for (let box = 0; box < boxes; box += 1) {
-    sampler.next(x);
-    if (!possible(values.entries, x)) continue;
+    if (box % BLOCK === 0) sampler.draw(Math.min(BLOCK, boxes - box));
+    if (sampler.possible[box % BLOCK] !== 1) continue;
+    sampler.row(box % BLOCK, x);
     plan.fill(x);
     if (!circuit.sound) continue;
     for (let i = 0; i < points; i += 1) {

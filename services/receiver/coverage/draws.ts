@@ -5,14 +5,14 @@ import { advance, mulberry32, streamSeed, unitDraw } from '../numeric/random';
 import type { Entry } from '../network/values';
 
 /** Turns a uniform draw into a value of its part. */
-export type Drawer = (u: number) => number;
+type Drawer = (u: number) => number;
 
 /** Probability of a normal value below -3 sigma. */
 const NORMAL_FROM = 1.3498980316300933e-3;
 const NORMAL_SPAN = 1 - 2 * NORMAL_FROM;
 
 /** @see evaluate.md rule 8; sigma of a normal value is a third of its tolerance, cut at +-3 sigma */
-export function drawerOf(entry: Entry): Drawer {
+function drawerOf(entry: Entry): Drawer {
   const { centre: x, tol: t, bin: b, dist, lot } = entry;
   if (lot !== null) {
     const quantile = studentTable(lot.n - 1);
@@ -62,29 +62,89 @@ function studentTable(freedom: number): Drawer {
   };
 }
 
-/** Draws a row of values a box, each value from its own stream. */
+/** Boxes drawn at a time. */
+export const BLOCK = 512;
+
+/** Draws blocks of boxes, a column a value, each value from its own stream. Allocates nothing once it stands. */
 export interface Sampler {
-  next(x: Float64Array): void;
+  /** Draws the next boxes, at most a block of them. */
+  draw(count: number): void;
+  /** Columns of the block, in the order of the indices. */
+  columns: readonly Float64Array[];
+  /** 1 where every drawn value lies within the limits of its field. */
+  possible: Uint8Array;
+  /** Writes the values of one box of the block into a row. */
+  row(box: number, x: Float64Array): void;
+}
+
+interface Stream {
+  entry: Entry;
+  index: number;
+  state: number;
+  column: Float64Array;
+  drawer: Drawer;
 }
 
 export function samplerOf(entries: readonly Entry[], indices: readonly number[], seed: number): Sampler {
-  const states = new Uint32Array(indices.length);
-  const drawers = indices.map((index) => drawerOf(entries[index] ?? missing(index)));
-  indices.forEach((index, place) => {
-    states[place] = streamSeed(seed, entries[index]?.path ?? '');
+  const streams = indices.map((index): Stream => {
+    const entry = entries[index];
+    if (entry === undefined) throw new RangeError(`No value ${index} in this design.`);
+    return {
+      entry,
+      index,
+      state: streamSeed(seed, entry.path),
+      column: new Float64Array(BLOCK),
+      drawer: drawerOf(entry),
+    };
   });
+  const possible = new Uint8Array(BLOCK);
   return {
-    next(x) {
-      for (let place = 0; place < indices.length; place += 1) {
-        const state = advance(states[place] ?? 0);
-        states[place] = state;
-        const draw = drawers[place];
-        if (draw !== undefined) x[indices[place] ?? 0] = draw(unitDraw(mulberry32(state)));
+    columns: streams.map(({ column }) => column),
+    possible,
+    draw(count) {
+      possible.fill(1);
+      for (const stream of streams) {
+        stream.state = drawInto(stream, count);
+        withinLimits(stream, count, possible);
+      }
+    },
+    row(box, x) {
+      for (let i = 0; i < streams.length; i += 1) {
+        const stream = streams[i];
+        if (stream !== undefined) x[stream.index] = at(stream.column, box);
       }
     },
   };
 }
 
-function missing(index: number): never {
-  throw new RangeError(`No value ${index} in this design.`);
+/** Fills a column and returns the stream's state after it. A uniform value, the commonest, has a loop without calls. */
+function drawInto({ entry, state, column, drawer }: Stream, count: number): number {
+  let now = state;
+  if (entry.lot === null && entry.dist === 'uniform') {
+    const { centre: x, tol: t } = entry;
+    for (let i = 0; i < count; i += 1) {
+      now = advance(now);
+      column[i] = x * (1 + t * (2 * unitDraw(mulberry32(now)) - 1));
+    }
+  } else if (entry.lot === null && entry.dist === 'normal') {
+    const { centre: x, tol: t } = entry;
+    for (let i = 0; i < count; i += 1) {
+      now = advance(now);
+      column[i] = x * (1 + (t / 3) * normalQuantile(NORMAL_FROM + unitDraw(mulberry32(now)) * NORMAL_SPAN));
+    }
+  } else {
+    for (let i = 0; i < count; i += 1) {
+      now = advance(now);
+      column[i] = drawer(unitDraw(mulberry32(now)));
+    }
+  }
+  return now;
+}
+
+function withinLimits({ entry, column }: Stream, count: number, possible: Uint8Array): void {
+  const [least, most] = entry.limits;
+  for (let i = 0; i < count; i += 1) {
+    const drawn = at(column, i);
+    if (!(drawn >= least && drawn <= most)) possible[i] = 0;
+  }
 }

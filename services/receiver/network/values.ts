@@ -1,4 +1,3 @@
-import { at } from '../numeric/cells';
 import { howeFactor } from '../numeric/quantiles';
 import type { Limits } from '../schema/limits';
 import { centre, type Distribution, type Value } from '../schema/value';
@@ -77,14 +76,4 @@ export function variance({ centre, tol, dist, bin, lot }: Entry, ln: (x: number)
     return (square * width * width) / 3;
   }
   return (square * tol * tol) / 3;
-}
-
-/** Whether every drawn value lies within the limits of its field. */
-export function possible(entries: readonly Entry[], x: Float64Array): boolean {
-  for (let i = 0; i < entries.length; i += 1) {
-    const limits = entries[i]?.limits;
-    const drawn = at(x, i);
-    if (limits !== undefined && !(drawn >= limits[0] && drawn <= limits[1])) return false;
-  }
-  return true;
 }

@@ -36,7 +36,7 @@ export function nearestFix(
   { seed = 1, boxes = 2000, rules = defaultRules }: FixOptions = {},
 ): Fix[] {
   const design = parseDesign(input);
-  const figures = survey(design, { seed, boxes, rules, depth: codes.includes('BAND-YIELD') ? 'boxes' : 'corners' });
+  const figures = survey(design, { seed, boxes, rules, depth: codes.includes('BAND-YIELD') ? 'verdict' : 'corners' });
   const all = CATALOGUE.flatMap(([, look]) => look(figures));
   const before = new Set(all.filter((found) => found.severity === 'stop').map((found) => found.code));
   const fixes: Fix[] = [];

@@ -126,8 +126,9 @@ export function remedyFor(
   context: RemedyContext,
   before: ReadonlySet<string>,
 ): Finding['remedy'] {
-  const most = { nominal: MOST_TRIES, corners: MOST_CORNERS, boxes: MOST_DRAWN };
-  const budget = { left: most[depthOf(found.code)] };
+  const depth = depthOf(found.code);
+  const most = depth === 'share' ? MOST_DRAWN : depth === 'nominal' ? MOST_TRIES : MOST_CORNERS;
+  const budget = { left: most };
   const search: Search = { found, rules: figures.rules, context, before };
   let fallback: Finding['remedy'] = null;
   for (const knob of knobsOf(found, figures, context.input)) {

@@ -1,6 +1,7 @@
 import { CATALOGUE } from '../findings/catalogue';
 import type { Found } from '../findings/finding';
 import { InvalidInput } from '../invalid-input';
+import { clopperPearson } from '../numeric/quantiles';
 import { parseDesign } from '../parse';
 import { survey, type SurveyDepth } from '../survey';
 import type { Ends } from '../coverage/reach';
@@ -21,8 +22,22 @@ export interface Outcome {
 
 /** How far a design has to be worked out before a finding of this code can be told. */
 export function depthOf(code: string): SurveyDepth {
-  if (code === 'BAND-YIELD') return 'boxes';
-  return code === 'BAND-CORNER' || code === 'BAND-AERIAL' || code === 'DATA-NONE' ? 'corners' : 'nominal';
+  if (code === 'BAND-YIELD') return 'share';
+  if (code === 'BAND-CORNER') return 'worst';
+  if (code === 'BAND-AERIAL') return 'aerials';
+  return code === 'DATA-NONE' ? 'corners' : 'nominal';
+}
+
+/** Most boxes that may miss before the sure share is below what is asked. */
+export function mostMissed(boxes: number, rules: Rules): number {
+  let low = -1;
+  let high = boxes;
+  while (high - low > 1) {
+    const missed = Math.floor((low + high) / 2);
+    if (clopperPearson(boxes - missed, boxes, rules.yieldConfidence).low >= rules.yieldTarget) low = missed;
+    else high = missed;
+  }
+  return low;
 }
 
 /** Judges a design with changes made, no deeper than asked; null where the changed file is not valid. */
@@ -34,7 +49,8 @@ export function attempt(
 ): Outcome | null {
   try {
     const design = parseDesign(applyChanges(input, changes));
-    const figures = survey(design, { ...options, depth });
+    const missed = depth === 'share' ? mostMissed(options.boxes, options.rules) : undefined;
+    const figures = survey(design, { ...options, depth, mostMissed: missed });
     return { reach: figures.reach.nominal, found: CATALOGUE.flatMap(([, look]) => look(figures)) };
   } catch (error) {
     if (error instanceof InvalidInput) return null;
