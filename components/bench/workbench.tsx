@@ -147,7 +147,7 @@ function Bench({ view, mayEdit, deeds }: WorkbenchProps) {
       <div className="grid flex-1 md:min-h-0 md:grid-cols-[minmax(0,5fr)_minmax(0,6fr)] lg:grid-cols-[minmax(0,560px)_minmax(0,1fr)]">
         <section
           aria-label="Parts and circuit"
-          tabIndex={-1}
+          tabIndex={0}
           className={`${pane === 'parts' ? '' : 'hidden'} relative min-w-0 px-4 py-4 sm:px-6 md:block md:overflow-y-auto md:border-r md:border-rule`}
         >
           <div className="grid gap-4">

@@ -2,7 +2,14 @@
 
 import { zodResolver } from '@hookform/resolvers/zod';
 import { useId, useState } from 'react';
-import { type DefaultValues, type FieldErrors, type FieldValues, type Path, useForm } from 'react-hook-form';
+import {
+  type DefaultValues,
+  type FieldErrors,
+  type FieldValues,
+  type Path,
+  type UseFormRegisterReturn,
+  useForm,
+} from 'react-hook-form';
 import type { z } from 'zod';
 import type { ProblemView } from '@/services/problem';
 import type { Action } from './action-result';
@@ -64,19 +71,26 @@ export function useActionForm<Input extends FieldValues, Value>(options: ActionF
     form,
     /** Props of a field: name, handlers, id and its error. */
     field: (name: Path<Input>) => ({
-      ...form.register(name),
+      ...withoutEmptyBlur(form.register(name), attempt),
       id: fieldId(name),
       error: sentencesOf(errors).find(({ path }) => path === name)?.sentence,
     }),
     submit: form.handleSubmit(send, () => setAttempt((count) => count + 1)),
     pending: isSubmitting,
-    /** For the error summary at the head of the form. */
-    summary: { attempt, errors: lines },
+    /** For the error summary at the head of the form: nothing before the first attempt to send it. */
+    summary: { attempt, errors: attempt === 0 ? [] : lines },
     problem,
     /** How often the deed was done; above zero the page can say so. */
     done,
   };
 }
+
+/** A field passed by and left empty is not told so before the form was sent once. */
+const withoutEmptyBlur = <R extends UseFormRegisterReturn>(registered: R, attempt: number): R => ({
+  ...registered,
+  onBlur: (event: Parameters<R['onBlur']>[0]) =>
+    attempt === 0 && event.target.value === '' ? Promise.resolve() : registered.onBlur(event),
+});
 
 /** Every sentence with the path of its field, in the order of the form. */
 function sentencesOf(errors: FieldErrors, prefix = ''): { path: string; sentence: string }[] {

@@ -44,7 +44,10 @@ export function CodeField({ ref, value, onChange, onSend }: CodeFieldProps) {
         spellCheck={false}
         className="w-0 min-w-0 flex-1 bg-transparent px-3 font-figures uppercase outline-none"
       />
-      <button type="submit" className="min-w-floor rounded-r-control bg-plate-deep px-4 font-bold text-on-enamel">
+      <button
+        type="submit"
+        className="min-w-floor rounded-r-control bg-plate-deep px-4 font-bold text-on-enamel outline-offset-[-7px]"
+      >
         Enter
       </button>
     </form>

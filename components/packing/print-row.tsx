@@ -24,7 +24,7 @@ export function PrintRow({ box, paper, printedAt, isLocked, isBusy, onPrinted }:
   const href = `/papers/${paper}/${box.id}`;
   const name = names[paper];
   return (
-    <li className="grid gap-2 rounded-panel bg-card px-4 py-3 text-ink">
+    <li className="grid gap-2 rounded-panel bg-card px-4 py-3 text-ink [--focus:var(--enamel)]">
       <span className="flex items-center gap-3">
         <Sign kind={printedAt === null ? 'waiting' : 'clears'} size={28} />
         <b>{printedAt === null ? `Print the ${name}` : `The ${name} is printed, ${showClock(printedAt)}`}</b>

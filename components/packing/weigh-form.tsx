@@ -30,7 +30,7 @@ export function WeighForm({ box, isBusy, onWeigh }: WeighFormProps) {
   }
 
   return (
-    <li className="grid gap-2 rounded-panel bg-card px-4 py-3 text-ink">
+    <li className="grid gap-2 rounded-panel bg-card px-4 py-3 text-ink [--focus:var(--enamel)]">
       <span className="flex items-start gap-3">
         <Sign kind={mass.weighed === null ? 'waiting' : mass.fits ? 'clears' : 'stops'} size={28} />
         <span>

@@ -46,7 +46,7 @@ export function PersonMenu({ actor, opens = 'below', named = false }: PersonMenu
         )}
       </summary>
       <div
-        className={`absolute z-30 w-60 rounded-panel border border-ink bg-card py-2 text-body text-ink shadow-lift ${places[opens]}`}
+        className={`absolute z-30 w-60 rounded-panel border [--focus:var(--enamel)] border-ink bg-card py-2 text-body text-ink shadow-lift ${places[opens]}`}
       >
         <p className="px-4 py-1 text-caption text-ink2">{actor.name}</p>
         <ul>

@@ -33,7 +33,7 @@ export function ShopBar({ actor, inBasket = 0 }: { actor: Actor; inBasket?: numb
           ))}
         </nav>
         <form action="/" role="search" className="ml-auto hidden sm:block">
-          <label className="flex min-h-target items-center gap-3 rounded-control border-1.5 border-edge bg-card px-3">
+          <label className="flex min-h-target items-center gap-3 rounded-control border-1.5 border-edge bg-card px-3 focus-within:outline-3 focus-within:outline-offset-2 focus-within:outline-enamel">
             <Icon name="search" />
             <span className="sr-only">Find a kit</span>
             <input name="q" type="search" placeholder="Find a kit" className="w-40 bg-transparent outline-none" />

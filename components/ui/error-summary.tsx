@@ -13,10 +13,14 @@ export type ErrorSummaryProps = {
 /** What must be mended before the form can be sent, with links to the fields. */
 export function ErrorSummary({ attempt, errors }: ErrorSummaryProps) {
   const box = useRef<HTMLDivElement>(null);
+  const told = useRef(0);
   const isShown = errors.length > 0;
 
+  // Once an attempt: what goes wrong later, while a field is left, does not pull the reader away.
   useEffect(() => {
-    if (isShown && attempt > 0) box.current?.focus();
+    if (!isShown || attempt <= told.current) return;
+    told.current = attempt;
+    box.current?.focus();
   }, [attempt, isShown]);
 
   if (!isShown) return null;

@@ -48,7 +48,11 @@ export function QuantityStepper(props: QuantityStepperProps) {
       aria-controls={id}
       aria-disabled={isEnd || undefined}
       onClick={() => !isEnd && take(shown + by)}
-      className={classes('grid h-full place-items-center hover:bg-well', ends[size], isEnd && 'text-edge')}
+      className={classes(
+        'grid h-full place-items-center outline-offset-[-4px] hover:bg-well',
+        ends[size],
+        isEnd && 'text-edge',
+      )}
     >
       <Icon name={by < 0 ? 'minus' : 'plus'} size={18} />
     </button>

@@ -46,13 +46,13 @@ export class Visitor {
   static async open(
     browser: Browser,
     name: string,
-    options: { screen?: Screen; dark?: boolean } = {},
+    options: { screen?: Screen; dark?: boolean; ownPolicy?: boolean } = {},
   ): Promise<Visitor> {
     const context = await browser.newContext({
       viewport: screens[options.screen ?? 'desktop'],
       colorScheme: options.dark ? 'dark' : 'light',
       // axe is evaluated into the page; the page's own policy is tested where the policy is the subject.
-      bypassCSP: true,
+      bypassCSP: options.ownPolicy !== true,
       baseURL: inject('url'),
       locale: 'en-GB',
     });
@@ -61,6 +61,11 @@ export class Visitor {
 
   async go(path: string): Promise<void> {
     await this.page.goto(path);
+  }
+
+  /** What the browser complained of since this was asked last. */
+  takeComplaints(): string[] {
+    return this.complaints.splice(0);
   }
 
   /** Signs in through the page of demo sign-ins, as a person would. */

@@ -5,9 +5,16 @@ import { LinkButton } from '@/components/ui/link-button';
 import { can } from '@/services/access';
 import { listVersions } from '@/services/kits';
 
-export const metadata: Metadata = { title: 'Bench' };
+interface Props {
+  searchParams: Promise<{ show?: string }>;
+}
 
-export default async function BenchPage({ searchParams }: { searchParams: Promise<{ show?: string }> }) {
+export async function generateMetadata({ searchParams }: Props): Promise<Metadata> {
+  const { show } = await searchParams;
+  return { title: show === 'mine' ? 'My versions, bench' : 'Kits, bench' };
+}
+
+export default async function BenchPage({ searchParams }: Props) {
   const { show } = await searchParams;
   const { kits, mayCreate } = await view(async (actor) => ({
     kits: await listVersions(actor),

@@ -11,13 +11,22 @@ import { readStore } from '@/services/stock';
 import { isFound } from '@/services/stock/rules';
 import { accept, block } from './actions';
 
-export const metadata: Metadata = { title: 'Store' };
+interface Props {
+  searchParams: Promise<Record<string, string | string[] | undefined>>;
+}
 
-type Search = Promise<Record<string, string | string[] | undefined>>;
-
-export default async function StorePage({ searchParams }: { searchParams: Search }) {
+const searched = async ({ searchParams }: Props): Promise<string> => {
   const asked = (await searchParams)['q'];
-  const q = typeof asked === 'string' ? asked.trim().slice(0, 80) : '';
+  return typeof asked === 'string' ? asked.trim().slice(0, 80) : '';
+};
+
+export async function generateMetadata(props: Props): Promise<Metadata> {
+  const q = await searched(props);
+  return { title: q === '' ? 'Store' : `‘${q}’, store` };
+}
+
+export default async function StorePage(props: Props) {
+  const q = await searched(props);
   const { parts } = await view(readStore);
   const actor = await currentActor();
   const found = parts.filter((part) => isFound(part, q));

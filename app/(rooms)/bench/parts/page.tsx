@@ -6,11 +6,16 @@ import { can } from '@/services/access';
 import { listParts } from '@/services/parts';
 import { PART_KINDS } from '@/services/parts/schemas';
 
-export const metadata: Metadata = { title: 'Parts' };
+interface Props {
+  searchParams: Promise<{ q?: string; kind?: string; after?: string; retired?: string }>;
+}
 
-type Search = { q?: string; kind?: string; after?: string; retired?: string };
+export async function generateMetadata({ searchParams }: Props): Promise<Metadata> {
+  const { q = '' } = await searchParams;
+  return { title: q === '' ? 'Parts' : `‘${q.slice(0, 80)}’, parts` };
+}
 
-export default async function PartsPage({ searchParams }: { searchParams: Promise<Search> }) {
+export default async function PartsPage({ searchParams }: Props) {
   const { q = '', kind, after, retired } = await searchParams;
   const known = PART_KINDS.find((one) => one === kind);
   const { page, mayEdit } = await view(async (actor) => ({

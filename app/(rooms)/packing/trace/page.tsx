@@ -8,16 +8,23 @@ import { traceLot } from '@/services/packing';
 import { isSerial } from '@/services/packing/rules';
 import { Problem } from '@/services/problem';
 
-export const metadata: Metadata = { title: 'Trace' };
-
 interface Props {
   searchParams: Promise<{ code?: string | string[] }>;
 }
 
+const searched = async ({ searchParams }: Props): Promise<string> => {
+  const { code } = await searchParams;
+  return typeof code === 'string' ? code.trim().toUpperCase() : '';
+};
+
+export async function generateMetadata(props: Props): Promise<Metadata> {
+  const code = await searched(props);
+  return { title: code === '' ? 'Trace' : `${code}, trace` };
+}
+
 /** One field for both ways: a box serial leads to its lots, a lot's label code to its boxes. */
-export default async function TracePage({ searchParams }: Props) {
-  const { code: asked } = await searchParams;
-  const code = typeof asked === 'string' ? asked.trim().toUpperCase() : '';
+export default async function TracePage(props: Props) {
+  const code = await searched(props);
   if (isSerial(code)) redirect(`/packing/trace/${code}`);
   const found = await view(async (actor) => {
     must(actor, 'box.trace');
