@@ -23,7 +23,8 @@ const looks: Record<NoticeProps['kind'], string> = {
   clears: 'border-pine bg-pine-wash',
   note: 'border-ochre bg-ochre-wash',
   stops: 'border-crimson bg-crimson-wash',
-  info: 'border-enamel bg-enamel-wash',
+  // Enamel on its own wash falls under 7 to 1 in the dark: links in it are ink.
+  info: 'border-enamel bg-enamel-wash [&_.link]:text-ink',
 };
 const titles: Record<NoticeProps['kind'], string> = {
   clears: 'text-pine',

@@ -1,5 +1,5 @@
 import type { Browser } from 'playwright-core';
-import { afterAll, beforeAll, describe, expect, test } from 'vitest';
+import { afterAll, beforeAll, expect, test } from 'vitest';
 import { everybody, pages, pathOf, people } from './pages';
 import { Visitor, launch } from './visitor';
 
@@ -114,26 +114,28 @@ function faintTexts(): Faint[] {
   return faint;
 }
 
-const theirs = (who: (typeof everybody)[number]) => pages.filter((page) => page.who[0] === who);
+/** Each page once: as the first of those who may see it, and again in the dark where it follows the system. */
+const looks = everybody.flatMap((who) => {
+  const theirs = pages.filter((page) => page.who[0] === who);
+  const dark = theirs.filter((page) => page.dark);
+  const light = { who, scheme: 'light' as const, paths: theirs.map(({ path }) => path) };
+  return dark.length === 0 ? [light] : [light, { who, scheme: 'dark' as const, paths: dark.map(({ path }) => path) }];
+});
 
-describe.each(everybody)('as %s', (who) => {
-  test.each(['light', 'dark'] as const)('no text is faint in the %s', async (colorScheme) => {
-    const visitor = await Visitor.open(browser, 'contrast', { dark: colorScheme === 'dark' });
-    const { page } = visitor;
-    const person = people[who];
-    if (person !== null) await visitor.signInAs(person);
-    // Tall, so that everything is on the screen, where what lies under a word can be asked for.
-    await page.setViewportSize({ width: 1440, height: 4000 });
-    const faint: Record<string, Faint[]> = {};
-    for (const { path, dark } of theirs(who)) {
-      // What stays light in the dark is looked at once.
-      if (colorScheme === 'dark' && !dark) continue;
-      await visitor.go(await pathOf(path));
-      await page.waitForLoadState('networkidle');
-      const found = await page.evaluate(faintTexts);
-      if (found.length > 0) faint[path] = found;
-    }
-    expect(faint).toEqual({});
-    await visitor.close();
-  });
+test.each(looks)('as $who, no text is faint in the $scheme', async ({ who, scheme, paths }) => {
+  const visitor = await Visitor.open(browser, 'contrast', { dark: scheme === 'dark' });
+  const { page } = visitor;
+  const person = people[who];
+  if (person !== null) await visitor.signInAs(person);
+  // Tall, so that everything is on the screen, where what lies under a word can be asked for.
+  await page.setViewportSize({ width: 1440, height: 4000 });
+  const faint: Record<string, Faint[]> = {};
+  for (const path of paths) {
+    await visitor.go(await pathOf(path));
+    await page.waitForLoadState('networkidle');
+    const found = await page.evaluate(faintTexts);
+    if (found.length > 0) faint[path] = found;
+  }
+  expect(faint).toEqual({});
+  await visitor.close();
 });

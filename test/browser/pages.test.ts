@@ -111,6 +111,12 @@ describe.each(refusals)('as $who, refused with $status', ({ who, status, paths }
   });
 });
 
+test('the size of targets is among the rules that are run', async () => {
+  const visitor = await visitorOf('visitor');
+  await visitor.go('/');
+  expect(await visitor.rulesRun()).toContain('target-size');
+});
+
 test.each(guarded)('a visitor who asks for %s signs in first and comes back there', async (path) => {
   const visitor = await visitorOf('visitor');
   await visitor.go(path);

@@ -28,6 +28,12 @@ export type Screen = keyof typeof screens;
 const axeSource = readFileSync(createRequire(import.meta.url).resolve('axe-core/axe.min.js'), 'utf8');
 const tags = ['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa', 'best-practice'];
 
+interface AxeResult {
+  id: string;
+  impact: string;
+  nodes: { html: string }[];
+}
+
 /** One person at one screen: what they see, and every complaint of the browser while they look. */
 export class Visitor {
   readonly complaints: string[] = [];
@@ -88,18 +94,28 @@ export class Visitor {
 
   /** Violations that axe finds on the page as it stands, a line each. */
   async faults(): Promise<string[]> {
+    const { violations } = await this.#axe();
+    const { pathname } = new URL(this.page.url());
+    return violations.map(({ id, impact, nodes }) => `${pathname}: ${id} (${impact}) ${nodes[0]?.html ?? ''}`);
+  }
+
+  /** The rules that axe looked at the page with, whether they found anything or not. */
+  async rulesRun(): Promise<string[]> {
+    const { violations, passes, inapplicable, incomplete } = await this.#axe();
+    return [...violations, ...passes, ...inapplicable, ...incomplete].map(({ id }) => id);
+  }
+
+  async #axe(): Promise<Record<'violations' | 'passes' | 'inapplicable' | 'incomplete', AxeResult[]>> {
     await this.page.evaluate(axeSource);
     return this.page.evaluate(async (runOnly) => {
       // `axe` is what the source above has just defined in the page.
       const { axe } = window as unknown as {
         axe: {
-          run(options: unknown): Promise<{ violations: { id: string; impact: string; nodes: { html: string }[] }[] }>;
+          run(options: unknown): Promise<Record<'violations' | 'passes' | 'inapplicable' | 'incomplete', AxeResult[]>>;
         };
       };
-      const { violations } = await axe.run({ runOnly });
-      return violations.map(
-        ({ id, impact, nodes }) => `${location.pathname}: ${id} (${impact}) ${nodes[0]?.html ?? ''}`,
-      );
+      const { violations, passes, inapplicable, incomplete } = await axe.run({ runOnly });
+      return { violations, passes, inapplicable, incomplete };
     }, tags);
   }
 
