@@ -177,6 +177,9 @@ export const showResistance = (value: number) => showQuantity(value, unitFor(val
 /** Frequencies stand ungrouped, whole kilohertz. */
 export const showKHz = (value: number) => `${Math.round(value / 1000)}\u202fkHz`;
 
+/** The edge of a band as the plan of bands gives it, to a tenth: 526.5 kHz. */
+export const showEdge = (value: number) => `${Math.round(value / 100) / 10}\u202fkHz`;
+
 /** "20 000" with thin no-break blanks from five digits on; minus is U+2212. */
 export function grouped(figures: string | number): string {
   const text = String(figures);

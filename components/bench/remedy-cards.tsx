@@ -20,7 +20,11 @@ export function RemedyCards({ band, remedies, onTry }: RemedyCardsProps) {
       <h3 id="remedies-title" className="mb-2 font-bold">
         {mends ? `${count[remedies.length] ?? `${remedies.length} ways`} to mend it` : 'Nothing mends it alone'}{' '}
         <span className="font-normal text-caption text-ink2">
-          {mends ? 'each worked out with the same tolerances' : 'these come nearest; two of them together may do'}
+          {mends
+            ? 'each worked out with the same tolerances'
+            : remedies.length === 1
+              ? 'this comes nearest'
+              : 'these come nearest; two of them together may do'}
         </span>
       </h3>
       <ul className="grid gap-3 sm:grid-cols-2 lg:grid-cols-3">

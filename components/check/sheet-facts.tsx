@@ -13,7 +13,7 @@ export function SheetFacts({ sheet }: { sheet: Sheet }) {
   const { circuit, lines } = content;
   const { winding } = circuit;
   return (
-    <Panel title="What was judged" ground="open" level={3} className="border-t-0 pt-0">
+    <Panel title="What was judged" ground="open" level={3} className="border-t-0! pt-0!">
       <Facts
         facts={[
           {

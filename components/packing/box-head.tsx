@@ -18,16 +18,16 @@ export function BoxHead({ box, sound }: { box: BoxView; sound: { isOn: boolean; 
         {box.serial}
         <span className="block text-caption">content {box.hash}</span>
       </p>
-      <div className="ml-auto flex items-center gap-4">
+      <div className="ml-auto flex min-w-0 items-center gap-4 max-sm:basis-full">
         <button
           type="button"
           onClick={sound.toggle}
           aria-pressed={sound.isOn}
-          className="min-h-14 rounded-control border-1.5 border-ink bg-card px-4 text-body font-bold"
+          className="min-h-14 rounded-control border-1.5 border-ink bg-card px-4 text-body font-bold whitespace-nowrap"
         >
           Sound {sound.isOn ? 'on' : 'off'}
         </button>
-        <div className="w-[250px] max-w-full">
+        <div className="w-[250px] min-w-0 max-sm:flex-1">
           <Progress label="In the tray" done={box.pieces.packed} of={box.pieces.needed} />
         </div>
       </div>

@@ -17,10 +17,13 @@ export function PanelFrame({ children, foot, attention }: PanelFrameProps) {
   }, [attention]);
   return (
     <>
-      <div ref={body} className="relative -mx-2 grid min-h-0 flex-1 content-start gap-3 overflow-y-auto px-2">
+      <div
+        ref={body}
+        className="relative -mx-2 grid min-h-0 flex-1 grid-cols-[minmax(0,1fr)] content-start gap-3 overflow-y-auto px-2"
+      >
         {children}
       </div>
-      <div className="grid shrink-0 gap-3">{foot}</div>
+      <div className="grid shrink-0 grid-cols-[minmax(0,1fr)] gap-3">{foot}</div>
     </>
   );
 }

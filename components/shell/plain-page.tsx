@@ -20,7 +20,7 @@ export function PlainPage({ title, drawing, children }: { title: string; drawing
             <div className="mt-4 max-w-measure space-y-4 text-lead">{children}</div>
           </div>
           <div className="rounded-panel border border-rule bg-well px-8 py-6 max-md:order-first max-md:justify-self-start">
-            <SvgDrawing drawing={partDrawing(drawing)} className="block h-auto w-24 md:w-72" />
+            <SvgDrawing drawing={partDrawing(drawing)} steadyLines className="block h-auto w-24 md:w-72" />
           </div>
         </div>
       </main>

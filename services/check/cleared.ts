@@ -2,7 +2,7 @@ import type { Verdict } from '../receiver';
 import type { Finding } from '../kits/rules';
 import { wireNeeded } from '../kits/rules';
 import type { VersionContent } from '../kits/schemas';
-import { grouped, showKHz, showQuantity } from '../quantity';
+import { grouped, showEdge, showKHz, showQuantity } from '../quantity';
 import type { Cleared } from './schemas';
 
 interface Rule {
@@ -23,7 +23,7 @@ const rules: readonly Rule[] = [
     codes: ['BAND-LOW'],
     title: 'Low end',
     says: ({ reach }, { kit }) => ({
-      text: `The band starts at ${showKHz(kit.band.lo)}.`,
+      text: `The band starts at ${showEdge(kit.band.lo)}.`,
       figure: showKHz(reach.nominal.lo),
     }),
   },
@@ -31,7 +31,7 @@ const rules: readonly Rule[] = [
     codes: ['BAND-HIGH'],
     title: 'High end',
     says: ({ reach }, { kit }) => ({
-      text: `The band ends at ${showKHz(kit.band.hi)}.`,
+      text: `The band ends at ${showEdge(kit.band.hi)}.`,
       figure: showKHz(reach.nominal.hi),
     }),
   },

@@ -102,9 +102,9 @@ export function cardDrawing(kit: KitLook): Drawing {
 
 /** A card shows every coil to one scale, so that a wide tube looks wide beside a slim one: 1.12 units a millimetre. */
 function cardTube(tube: Tube = usualTube): TubeBox {
-  const scale = Math.min(1120, 176 / tube.length, 108 / tube.diameter);
+  const scale = Math.min(1120, 172 / tube.length, 84 / tube.diameter);
   const [length, diameter, winding] = [tube.length * scale, tube.diameter * scale, tube.wound * scale];
-  return { x: at(118 - length / 2), y: at(68 - diameter / 2), length, diameter, from: (length - winding) / 2, winding };
+  return { x: at(118 - length / 2), y: at(78 - diameter / 2), length, diameter, from: (length - winding) / 2, winding };
 }
 
 /** Proportions where no former is known. */
