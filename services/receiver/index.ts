@@ -28,6 +28,8 @@ export { canonicalJson, sha256 } from './numeric/digest';
 export { Rules, rules as defaultRules } from './rules';
 export { centre, type Spread, type Value } from './schema/value';
 export { applyChanges } from './seek/changes';
+export { AERIAL_TAP, FIRST_CAPACITOR, type Choice, type SeekAsk, type StockLists, type StockPart } from './seek/ask';
 export { nearestFix, type Fix, type FixOptions } from './seek/nearest-fix';
+export { seek, type SeekCursor, type SeekProgress, type SeekResult, type Seeker } from './seek/seek';
 export { Finding, Verdict, type Change, type Point, type Severity } from './verdict';
 export { ENGINE_VERSION } from './version';
