@@ -22,7 +22,7 @@ export interface FootBarProps {
 /** Cost, mass and the state of saving at the left, the way on at the right. Stays in sight. */
 export function FootBar({ costMinor, massMilligrams, pieces, save, onRetry, children }: FootBarProps) {
   return (
-    <footer className="sticky bottom-18 z-10 flex flex-wrap items-center gap-x-5 gap-y-1 border-t border-rule bg-paper px-4 py-2 sm:px-6 md:bottom-0 md:py-2.5">
+    <footer className="sticky bottom-18 z-10 flex flex-wrap items-center gap-x-3 gap-y-1 border-t border-rule bg-paper px-4 py-2 sm:px-6 sm:gap-x-5 md:bottom-0 md:py-2.5">
       <p className="text-caption sm:text-table">
         <span className="max-sm:sr-only">Parts cost</span>{' '}
         <span className="font-figures font-semibold">{formatMoney(money(costMinor, 'GBP'))}</span>,{' '}
@@ -42,7 +42,7 @@ function SaveMark({ save, onRetry }: { save: SaveState; onRetry: () => void }) {
     <div role="status" aria-live="polite" className="flex min-h-6 items-center gap-2 text-caption text-ink2">
       {save.kind === 'saved' && (
         <>
-          <Icon name="check" size={16} />
+          <Icon name="check" size={16} className="max-sm:hidden" />
           {`Saved ${save.earlier ? showMoment(save.at) : showClock(save.at)}`}
         </>
       )}

@@ -9,14 +9,15 @@ import { TextArea, TextField } from '@/components/ui/field';
 import { Notice } from '@/components/ui/notice';
 import { Panel } from '@/components/ui/panel';
 import { Select } from '@/components/ui/select';
-import { formatMoney, parseMoney } from '@/services/money';
-import { ChangePart, NewPart, PART_KINDS, PartValues, type PartView, partKinds } from '@/services/parts/schemas';
+import { formatMoney, money, parseMoney } from '@/services/money';
+import { ChangePart, NewPart, PART_KINDS, type PartView, partKinds } from '@/services/parts/schemas';
 import { type FieldSentences, Problem, type ProblemView, parse } from '@/services/problem';
 import { currentPart, PartConflict } from './part-conflict';
 import { PartField, type TypedValues } from './part-field';
 import { fieldsOf, firstEarphone, firstValues } from './part-fields';
 import { PartPicture } from './part-picture';
 import { QuantityField } from './quantity-field';
+import { asValues, idOf, pictured, sentencesOf } from './typed-part';
 
 export type PartFormProps =
   { part: null; addPart: Action<NewPart, PartView> } | { part: PartView; changePart: Action<ChangePart, PartView> };
@@ -58,12 +59,23 @@ export function PartForm(props: PartFormProps) {
   async function send() {
     setProblem(null);
     const cost = parseMoney(price, 'GBP');
-    const about = { name, massMilligrams: grams === null ? undefined : Math.round(grams * 1000), cost, note, values };
-    const early: FieldSentences = {
-      ...(cost === null && { cost: 'Give the cost like 1.25.' }),
-      ...(grams === null && { massMilligrams: 'Give the mass in grams; packing checks the box by it.' }),
+    // Nothing stands for what is missing, so that everything else that is wrong is said with it.
+    const about = {
+      name,
+      massMilligrams: grams === null ? 0 : Math.round(grams * 1000),
+      cost: cost ?? money(0, 'GBP'),
+      note,
+      values,
     };
-    if (Object.keys(early).length > 0) return fail(early);
+    const missing: FieldSentences = {
+      ...(grams === null && { massMilligrams: 'Give the mass in grams; packing checks the box by it.' }),
+      ...(cost === null && { cost: 'Give the cost like 1.25.' }),
+    };
+    const wrong = {
+      ...(part === null ? sentencesOf(NewPart, { code, ...about }) : sentencesOf(NewPart.omit({ code: true }), about)),
+      ...missing,
+    };
+    if (Object.keys(wrong).length > 0) return fail(wrong);
     setSending(true);
     try {
       const answer =
@@ -94,7 +106,7 @@ export function PartForm(props: PartFormProps) {
   return (
     <form
       noValidate
-      className="grid max-w-4xl gap-6"
+      className="grid max-w-4xl content-start gap-6"
       onSubmit={(event) => {
         event.preventDefault();
         void send();
@@ -155,7 +167,7 @@ export function PartForm(props: PartFormProps) {
           error={errors['name']}
         />
       </div>
-      <div className="grid items-end gap-4 sm:grid-cols-3">
+      <div className="grid items-start gap-4 sm:grid-cols-3">
         {part === null ? (
           <Select
             label="Kind"
@@ -222,18 +234,4 @@ export function PartForm(props: PartFormProps) {
       </div>
     </form>
   );
-}
-
-const idOf = (path: string) => `part-${path.split('.').slice(0, 2).join('-').replace('cost-minor', 'cost')}`;
-
-/** What was typed so far as the kind's values; while something is missing, the kind's usual ones, to know the fields. */
-function asValues(values: TypedValues, kind: (typeof PART_KINDS)[number]): PartValues {
-  if (kind === 'earphone') return firstEarphone(values['earphoneKind'] === 'ceramic' ? 'ceramic' : 'magnetic');
-  return firstValues(kind);
-}
-
-/** What the picture beside the values shows: the drawing chosen for hardware, else the kind's own. */
-function pictured(values: TypedValues, kind: (typeof PART_KINDS)[number]): PartValues {
-  const typed = PartValues.safeParse(values);
-  return typed.success ? typed.data : asValues(values, kind);
 }

@@ -197,7 +197,7 @@ function Bench({ view, mayEdit, deeds }: WorkbenchProps) {
       >
         {canChange && <UndoButtons store={store} canUndo={snapshot.canUndo} canRedo={snapshot.canRedo} />}
         {canChange && lockedReason === undefined && stops > 0 && (
-          <p className="text-caption text-ink2">
+          <p className="text-caption text-ink2 max-sm:flex-1 max-sm:basis-32">
             {stops === 1
               ? 'One stop stands; the check room will hold it.'
               : `${stops} stops stand; the check room will hold it.`}

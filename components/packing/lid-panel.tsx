@@ -50,7 +50,7 @@ export function LidPanel({ box, answer, dismiss, deeds, change, isBusy, field }:
           content <span className="font-figures">{box.hash}</span>
         </p>
       </div>
-      <ol className="grid gap-3">
+      <ol className="grid grid-cols-[minmax(0,1fr)] gap-3">
         <PrintRow
           box={box}
           paper="guide"

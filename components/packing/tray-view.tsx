@@ -31,7 +31,10 @@ export function TrayView({ box, onPutBack }: TrayViewProps) {
 
   return (
     <section ref={tray} aria-label="Tray" tabIndex={0} className="min-h-0 overflow-y-auto p-4 sm:p-5">
-      <Tray label="Places of the tray" className={classes('min-h-full', isCrowded && 'md:grid-cols-3 lg:grid-cols-5')}>
+      <Tray
+        label="Places of the tray"
+        className={classes('min-h-full', isCrowded && 'md:max-lg:grid-cols-3! lg:grid-cols-5')}
+      >
         {box.places.map((place) => (
           <TrayPlace
             key={place.lineId}
