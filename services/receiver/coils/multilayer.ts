@@ -31,7 +31,11 @@ export function multilayerRange(shape: MultilayerShape, from: number, to: number
   return loopsInductance(layerLoops(shape), from, to);
 }
 
-/** Inductance of an even multilayer winding: sum over all loops. A scramble winding differs by 6 %. */
+/**
+ * Inductance of an even multilayer winding: sum over all loops. Error: 1e-9 against the same sum with Carlson's integrals;
+ * a scramble winding differs by 6 % (common practice).
+ * @see coils-and-capacitors.md B3
+ */
 export function multilayer(shape: MultilayerShape): Henry {
   positive('innerDiameter', shape.innerDiameter);
   positive('length', shape.length);

@@ -29,7 +29,12 @@ export function rodPermeability(length: Metre, diameter: Metre, muInitial: numbe
   return muInitial / (1 + demagnetising * (muInitial - 1));
 }
 
-/** Inductance of a coil on a ferrite rod, without the limits of the fit: inner loops call this. Worst 6 %. */
+/**
+ * Inductance of a coil on a ferrite rod, without the limits of the fit: inner loops call this.
+ * Range of the fit: rods of 5 to 20 diameters, coil over rod 0.1 to 0.9, coils of 1.05 to 1.3 rod diameters. Error against a
+ * surface-charge solution: worst 6 %. Without a sample +-15 % with a stated material, +-25 % with an unknown one.
+ * @see coils-and-capacitors.md C
+ */
 export function rodFormula(shape: RodShape): Henry {
   const { rodLength, rodDiameter, muInitial, turns, coilLength, offset = 0 } = shape;
   const x = coilLength / rodLength;

@@ -8,12 +8,12 @@ export const COPPER_TEMPERATURE_COEFFICIENT = 0.00393;
 const COPPER_DENSITY = 8890;
 const ENAMEL_DENSITY = 1350;
 
-/** Resistivity of copper, ohm metre. */
+/** Resistivity of copper, ohm metre: 100 % IACS, linear in temperature, 233 to 373 K. @see coils-and-capacitors.md D */
 export function copper(temperature: Kelvin): number {
   return 1.7241e-8 * (1 + COPPER_TEMPERATURE_COEFFICIENT * (positive('temperature', temperature) - 293.15));
 }
 
-/** Ohm a metre at direct current. */
+/** Ohm a metre at direct current; wire within its diameter's tolerance differs by 2 to 3 % (6 % at 0.1 mm). */
 export function wireResistance(bare: Metre, temperature: Kelvin): number {
   return (4 * copper(temperature)) / (PI * positive('bare', bare) * bare);
 }
@@ -67,7 +67,10 @@ export interface Enamel {
   tolerance: Metre;
 }
 
-/** Diameters of enamelled wire; between the listed sizes the increases are interpolated, beyond them the end row's hold. */
+/**
+ * Diameters of enamelled wire; between the listed sizes the increases are interpolated, beyond them the end row's
+ * hold.
+ */
 export function enamel(bare: Metre, grade: 1 | 2): Enamel {
   const size = positive('bare', bare) * 1000;
   const key = grade === 1 ? 'grade1' : 'grade2';

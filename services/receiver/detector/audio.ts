@@ -7,7 +7,8 @@ export const MODULATION = 0.3;
 /**
  * Open audio voltage of a detector: half the difference of the rectified voltages at the crest and the trough of the
  * modulation, along the audio load line through the bias point.
- * @see evaluate.md rule 4
+ * Contacts without a measured curve differ by a factor of two and more (E1), and the level by 6 dB with them.
+ * @see evaluate.md rule 4; receiver.md E5 for the order of the classes' loudness
  */
 export function audioVoltage(d: Diode, open: Volt, source: Ohm, dcLoad: Ohm, audioLoad: Ohm): Volt {
   const bias = rectifyBehind(d, open, source, dcLoad);

@@ -93,7 +93,10 @@ export function audioPower(phone: EarphoneCircuit, audio: Volt, z: Impedance): W
   return ((audio * audio * z.r) / (2 * (z.r * z.r + z.x * z.x))) * loss;
 }
 
-/** Sensation level: decibel above the threshold. 50 dB is useful to an ordinary listener. */
+/**
+ * Sensation level: decibel above the threshold. 50 dB is useful to an ordinary listener; thresholds are of one
+ * listener and one method, +-6 dB.
+ */
 export function sensationLevel(power: Watt, threshold: Watt): number {
   return 10 * log10(power / threshold);
 }

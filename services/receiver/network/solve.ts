@@ -46,7 +46,9 @@ export function coilResistanceAt(circuit: Circuit, f: Hertz): Ohm {
 
 /**
  * Admittance between top and earth with the sources short-circuited, into `topRe` and `topIm`: everything but the
- * tuning capacitor. @see receiver.md C1, C2
+ * tuning capacitor. Range: the circuit forms of the design file, values of the trade. Error against ngspice over 96 random
+ * receivers: tuned frequency 1e-9.
+ * @see receiver.md C1, C2; test/reference/ngspice.test.ts
  */
 export function topAdmittance(circuit: Circuit, f: Hertz): void {
   aerialAdmittance(circuit, f);
@@ -74,7 +76,10 @@ export function capacitanceNeeded(circuit: Circuit, f: Hertz): Farad {
   return -circuit.topIm / (TWO_PI * f);
 }
 
-/** Impedance matrix of the nodes, into yr and yi; returns the number of nodes. The aerial's admittance must be up to date. */
+/**
+ * Impedance matrix of the nodes, into yr and yi; returns the number of nodes. The aerial's admittance must be up to
+ * date.
+ */
 function nodalInverse(circuit: Circuit, f: Hertz, tuning: Farad, loadG: number): number {
   const w = TWO_PI * f;
   const { sections, zr, zi, yr, yi, m, share } = circuit;
@@ -134,7 +139,11 @@ function incidence(n: number, sections: number, gamma: Float64Array, y: Float64A
   }
 }
 
-/** Magnitude of the detector's voltage for an EMF of 1 V, tuned with a capacitance. */
+/**
+ * Magnitude of the detector's voltage for an EMF of 1 V, tuned with a capacitance. Against ngspice over 96 random
+ * receivers 2e-7, also one channel beside the tuned one.
+ * @see receiver.md C1; test/reference/ngspice.test.ts
+ */
 export function voltagePerEmf(circuit: Circuit, f: Hertz, tuning: Farad): number {
   aerialAdmittance(circuit, f);
   const { aerialYr, aerialYi } = circuit;

@@ -1,6 +1,7 @@
 /**
  * Sine, cosine, tangent and arc tangent from + - * / alone (published kernels of fdlibm), for arguments up to 1e5.
- * The engine's arguments are electrical lengths of a few radians.
+ * Error below 1 unit in the last place of NumPy's. The engine's arguments are electrical lengths of a few radians.
+ * @see test/reference/numerics.test.ts
  */
 const TWO_OVER_PI = 6.36619772367581382433e-1;
 const HALF_PI_1 = 1.57079632673412561417;

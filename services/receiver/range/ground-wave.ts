@@ -105,13 +105,20 @@ export function flatEarthLimit(f: Hertz): Metre {
   return 80000 / exp(log(f / 1e6) / 3);
 }
 
-/** Factor for the curvature of the earth: our own fit, pessimistic on purpose; no estimate beyond three limits. */
+/**
+ * Factor for the curvature of the earth: our own fit to LFMF, pessimistic on purpose; no estimate beyond three limits.
+ * @see receiver.md G1
+ */
 export function curvature(f: Hertz, distance: Metre): number {
   const ratio = distance / flatEarthLimit(f);
   return exp(((-1.3 * exp(1.6 * log(ratio))) / 20) * 2.302585092994046);
 }
 
-/** Field of a station by day, rms V/m, or null beyond three flat-earth limits. Hills and towns: +-10 dB. */
+/**
+ * Field of a station by day, rms V/m, or null beyond three flat-earth limits. Range: 0.2 to 1.6 MHz, six grounds. Error
+ * against NTIA's LFMF: -0.8 to 0 dB inside the flat-earth limit, -5 to 0 dB to three of them; hills and towns +-10 dB.
+ * @see receiver.md G1
+ */
 export function stationField(power: Watt, ground: Ground, f: Hertz, distance: Metre): number | null {
   within('distance', distance, 1, 2e7);
   if (distance > 3 * flatEarthLimit(f)) return null;

@@ -17,7 +17,10 @@ export function manMadeNoise(environment: Environment, f: Hertz): number {
   return c - d * log10(f / 1e6);
 }
 
-/** Noise field at a short vertical, dB above 1 uV/m. */
+/**
+ * Noise field at a short vertical, dB above 1 uV/m (ITU-R P.372's form). Local switching can lie far above it. @see
+ * receiver.md G3
+ */
 export function noiseField(figureDb: number, f: Hertz, bandwidth: Hertz): number {
   return figureDb + 20 * log10(f / 1e6) + 10 * log10(bandwidth) - 95.5;
 }

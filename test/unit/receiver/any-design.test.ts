@@ -11,7 +11,10 @@ import {
 import { anyDesign } from './any-design';
 import { nearDesign } from './near-design';
 
-const RUNS = { numRuns: 120, seed: 20261201 };
+/** The long run judges 500 designs of each kind. */
+const isLong = process.env['SCHEDULES'] !== undefined;
+const RUNS = { numRuns: isLong ? 500 : 120, seed: 20261201 };
+const PATIENCE = isLong ? 1_800_000 : 120_000;
 
 /** The verdict of a design, or null where the file is refused. */
 function verdictOf(design: DesignInput, options?: EvaluateOptions): Verdict | null {
@@ -47,7 +50,7 @@ describe('whatever the form lets through', () => {
         const other = verdictOf(design, { seed: seed + 1, boxes: 400 });
         expect(other?.reach).toEqual(first?.reach);
       }),
-      { ...RUNS, numRuns: 30 },
+      { ...RUNS, numRuns: isLong ? 500 : 30 },
     );
   });
 
@@ -82,7 +85,7 @@ describe('whatever the form lets through', () => {
           }
         },
       ),
-      { ...RUNS, numRuns: 40 },
+      { ...RUNS, numRuns: isLong ? 500 : 40 },
     );
   });
 });
@@ -109,15 +112,15 @@ function clearAll(designs: fc.Arbitrary<DesignInput>, numRuns: number): Map<stri
 }
 
 describe('a remedy', () => {
-  test('clears its finding in sets of every form', { timeout: 120_000 }, () => {
-    const codes = [...clearAll(anyDesign, 80).keys()];
+  test('clears its finding in sets of every form', { timeout: PATIENCE }, () => {
+    const codes = [...clearAll(anyDesign, isLong ? 500 : 80).keys()];
     expect(codes).toEqual(
       expect.arrayContaining(['BAND-LOW', 'BAND-HIGH', 'PHONE-Z', 'PHONE-DC', 'DET-UNSUIT', 'Q-LOW']),
     );
   });
 
-  test('clears its finding in sets that just about work', { timeout: 120_000 }, () => {
-    const codes = [...clearAll(nearDesign, 80).keys()];
+  test('clears its finding in sets that just about work', { timeout: PATIENCE }, () => {
+    const codes = [...clearAll(nearDesign, isLong ? 500 : 80).keys()];
     expect(codes).toEqual(
       expect.arrayContaining(['BAND-CORNER', 'BAND-YIELD', 'BAND-GAP', 'FORMER-SHORT', 'SEL-STRONG']),
     );
@@ -141,7 +144,7 @@ describe('a remedy', () => {
           }
         }
       }),
-      { numRuns: 30, seed: 7 },
+      { numRuns: isLong ? 500 : 30, seed: 7 },
     );
   });
 });
