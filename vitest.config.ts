@@ -19,7 +19,7 @@ export default defineConfig({
           include: ['test/{unit,reference,invariants,integration}/**/*.test.{ts,tsx}'],
           pool: 'forks',
           maxWorkers: 2,
-          testTimeout: 60_000,
+          testTimeout: 180_000,
           hookTimeout: 120_000,
         },
       },

@@ -69,15 +69,15 @@ const rich = anAsk({
     ...STOCK,
     formers: STOCK.formers.slice(0, 1),
     wires: STOCK.wires.slice(0, 1),
-    capacitors: STOCK.capacitors.slice(0, 2),
+    capacitors: STOCK.capacitors.filter(({ code }) => code !== 'C-365'),
     couplings: STOCK.couplings.slice(0, 1),
     detectors: STOCK.detectors.slice(0, 2),
     earphones: STOCK.earphones.slice(0, 2),
     returns: STOCK.returns.slice(0, 1),
   },
   couplings: ['series-c', 'aerial-tap'],
-  tapPlaces: 5,
-  turns: { least: 78, most: 84 },
+  tapPlaces: 4,
+  turns: { least: 70, most: 74 },
   boxes: 400,
 });
 
@@ -96,7 +96,7 @@ describe('seek', () => {
 
   test('lists the same where much clears, by each rank and with several windings of the same parts', () => {
     const clears = clearing(rich);
-    expect(clears.length).toBeGreaterThan(50);
+    expect(clears.length).toBeGreaterThan(30);
     for (const rank of ['cost', 'margin', 'stock'] as const) {
       for (const windingsEach of [1, 4]) {
         const ask: SeekAsk = { ...rich, rank, most: 6, windingsEach };
