@@ -15,7 +15,11 @@ export function StateNotice({
   pending: boolean;
 }) {
   const name = `${view.content.kit.number} ${view.letter}`;
-  const sheet = <TextLink href={`/check/${view.id}`}>Read its check sheet</TextLink>;
+  const sheet = (
+    <TextLink href={`/check/${view.id}`} className="text-ink!">
+      Read its check sheet
+    </TextLink>
+  );
   switch (view.state) {
     case 'draft':
       return null;
