@@ -82,17 +82,23 @@ export function phi(lengthOverDiameter: number, pitchOverWire: number): number {
   const p0 = PITCHES[column] ?? NaN;
   const p1 = PITCHES[column + 1] ?? NaN;
   const across = (pitch - p0) / (p1 - p0);
-  const inRow = (row: number): number => {
-    const cells = PHI[row];
-    const a = cells?.[column] ?? NaN;
-    return a + ((cells?.[column + 1] ?? NaN) - a) * across;
-  };
-  if (ratio >= 10) return inRow(11) + ((inRow(10) - inRow(11)) * 10) / ratio;
+  if (ratio >= 10) {
+    const longest = inRow(11, column, across);
+    return longest + ((inRow(10, column, across) - longest) * 10) / ratio;
+  }
   let row = 0;
   while (row < LENGTHS.length - 3 && ratio > (LENGTHS[row + 1] ?? NaN)) row += 1;
   const l0 = LENGTHS[row] ?? NaN;
   const l1 = LENGTHS[row + 1] ?? NaN;
-  return inRow(row) + ((inRow(row + 1) - inRow(row)) * (ratio - l0)) / (l1 - l0);
+  const low = inRow(row, column, across);
+  return low + ((inRow(row + 1, column, across) - low) * (ratio - l0)) / (l1 - l0);
+}
+
+/** A row of the table, between two of its columns. */
+function inRow(row: number, column: number, across: number): number {
+  const cells = PHI[row];
+  const a = cells?.[column] ?? NaN;
+  return a + ((cells?.[column + 1] ?? NaN) - a) * across;
 }
 
 /** What the loss model needs of a winding, worked out once a geometry. */

@@ -1,6 +1,7 @@
-import { capacitanceNeeded } from '../network/solve';
+import { topAdmittance } from '../network/solve';
 import type { Plan } from '../network/plan';
 import { clopperPearson } from '../numeric/quantiles';
+import { TWO_PI } from '../units';
 import { BLOCK, samplerOf, type Sampler } from './draws';
 import { oneNodeCounter, type Counter } from './one-node';
 
@@ -23,9 +24,14 @@ export interface BoxOptions {
 /** Whether the circuit as filled reaches both edges of the band: no root, two solves. */
 function covers(plan: Plan, x: Float64Array): boolean {
   const { circuit, design, mode } = plan;
-  if (!circuit.sound || !(capacitanceNeeded(circuit, design.band.lo) <= circuit.cMax)) return false;
+  const { lo, hi } = design.band;
+  if (!circuit.sound) return false;
+  // C_need as `capacitanceNeeded` has it; a call that returns a fraction would put each on the heap.
+  topAdmittance(circuit, lo);
+  if (!(-circuit.topIm / (TWO_PI * lo) <= circuit.cMax)) return false;
   if (mode !== 'capacitor') plan.moveTo(x, circuit.positionMin);
-  return capacitanceNeeded(circuit, design.band.hi) >= circuit.cMin;
+  topAdmittance(circuit, hi);
+  return -circuit.topIm / (TWO_PI * hi) >= circuit.cMin;
 }
 
 /** Boxes of any circuit form that cover, each by the solver. */

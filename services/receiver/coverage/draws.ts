@@ -1,6 +1,6 @@
 import { at } from '../numeric/cells';
 import { asinh, exp, log } from '../numeric/exp-log';
-import { normalAbove, normalQuantile, studentQuantileAbove } from '../numeric/quantiles';
+import { normalAbove, normalQuantile, normalQuantiles, studentQuantileAbove } from '../numeric/quantiles';
 import { advance, mulberry32, streamSeed, unitDraw } from '../numeric/random';
 import type { Entry } from '../network/values';
 
@@ -64,6 +64,8 @@ function studentTable(freedom: number): Drawer {
 
 /** Boxes drawn at a time. */
 export const BLOCK = 512;
+/** Passing values of one column, never kept from one call to the next. */
+const SCRATCH = new Float64Array(BLOCK);
 
 /** Draws blocks of boxes, a column a value, each value from its own stream. Allocates nothing once it stands. */
 export interface Sampler {
@@ -119,26 +121,29 @@ export function samplerOf(entries: readonly Entry[], indices: readonly number[],
 
 /** Fills a column and returns the stream's state after it. A uniform value, the commonest, has a loop without calls. */
 function drawInto({ entry, state, column, drawer }: Stream, count: number): number {
-  let now = state;
+  // As a signed 32-bit number the state stays off the heap; the bits are the same.
+  let now = state | 0;
   if (entry.lot === null && entry.dist === 'uniform') {
     const { centre: x, tol: t } = entry;
     for (let i = 0; i < count; i += 1) {
-      now = advance(now);
+      now = advance(now) | 0;
       column[i] = x * (1 + t * (2 * unitDraw(mulberry32(now)) - 1));
     }
   } else if (entry.lot === null && entry.dist === 'normal') {
     const { centre: x, tol: t } = entry;
     for (let i = 0; i < count; i += 1) {
-      now = advance(now);
-      column[i] = x * (1 + (t / 3) * normalQuantile(NORMAL_FROM + unitDraw(mulberry32(now)) * NORMAL_SPAN));
+      now = advance(now) | 0;
+      column[i] = NORMAL_FROM + unitDraw(mulberry32(now)) * NORMAL_SPAN;
     }
+    normalQuantiles(column, SCRATCH, count);
+    for (let i = 0; i < count; i += 1) column[i] = x * (1 + (t / 3) * at(column, i));
   } else {
     for (let i = 0; i < count; i += 1) {
-      now = advance(now);
+      now = advance(now) | 0;
       column[i] = drawer(unitDraw(mulberry32(now)));
     }
   }
-  return now;
+  return now >>> 0;
 }
 
 function withinLimits({ entry, column }: Stream, count: number, possible: Uint8Array): void {

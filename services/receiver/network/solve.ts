@@ -1,7 +1,7 @@
 import { effectiveHeight, radiationResistance } from '../aerial/wire';
 import { windingResistance } from '../coils/loss';
 import { at } from '../numeric/cells';
-import { invertComplex } from '../numeric/complex';
+import { invertSymmetric } from '../numeric/complex';
 import { tan } from '../numeric/trig';
 import { LIGHT_SPEED, TWO_PI, type Farad, type Hertz, type Metre, type Ohm } from '../units';
 import type { Circuit } from './circuit';
@@ -39,7 +39,10 @@ function aerialAdmittance(circuit: Circuit, f: Hertz): void {
 export function coilResistanceAt(circuit: Circuit, f: Hertz): Ohm {
   const reactance = TWO_PI * f * circuit.l;
   if (circuit.loss === 'q') return reactance / circuit.q;
-  if (circuit.loss === 'r') return circuit.r;
+  return circuit.loss === 'r' ? circuit.r : modelledResistance(circuit, f, reactance);
+}
+
+function modelledResistance(circuit: Circuit, f: Hertz, reactance: Ohm): Ohm {
   const copper = windingResistance(circuit.winding, f, circuit.skin) + reactance * circuit.coreTan;
   return circuit.winding.strands > 1 ? Math.max(copper, reactance / LITZ_Q_CAP) : copper;
 }
@@ -107,7 +110,7 @@ function nodalInverse(circuit: Circuit, f: Hertz, tuning: Farad, loadG: number):
       (circuit.primaryWinding === null ? 0 : windingResistance(circuit.primaryWinding, f, circuit.skin));
     zi[own] = w * circuit.primaryL;
   }
-  invertComplex(branches, zr, zi, circuit.order);
+  invertSymmetric(branches, zr, zi, circuit.order);
   incidence(branches, sections, zr, yr);
   incidence(branches, sections, zi, yi);
   const top = (sections - 1) * branches + sections - 1;
@@ -120,7 +123,7 @@ function nodalInverse(circuit: Circuit, f: Hertz, tuning: Farad, loadG: number):
   yi[tap] = at(yi, tap) + w * circuit.cj;
   yr[aerial] = at(yr, aerial) + circuit.aerialYr;
   yi[aerial] = at(yi, aerial) + circuit.aerialYi;
-  invertComplex(branches, yr, yi, circuit.order);
+  invertSymmetric(branches, yr, yi, circuit.order);
   return branches;
 }
 
