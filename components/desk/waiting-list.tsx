@@ -49,7 +49,7 @@ function wordsOf(one: Waiting): { sign: SignKind; title: string; text: string; h
     case 'held':
       return {
         sign: 'stops',
-        title: `${one.name} ${one.letter} was held`,
+        title: `${one.name} ${one.kitNumber}\u202f${one.letter} was held`,
         text: one.why,
         href: `/bench/${one.versionId}`,
         word: 'Read it',

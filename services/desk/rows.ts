@@ -89,6 +89,7 @@ export function ordersToLookAt(sql: Knex): Promise<{ id: string; number: string;
 export interface HeldVersion {
   id: string;
   name: string;
+  kitNumber: number;
   letter: string;
   why: string;
 }
@@ -111,6 +112,7 @@ export function heldVersions(sql: Knex): Promise<HeldVersion[]> {
     .select<HeldVersion[]>({
       id: 'versions.id',
       name: 'kits.name',
+      kitNumber: 'kits.number',
       letter: 'versions.letter',
       why: 'sign_offs.remark',
     });

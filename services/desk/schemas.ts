@@ -19,6 +19,7 @@ export const Waiting = z.discriminatedUnion('kind', [
     kind: z.literal('held'),
     versionId: VersionId,
     name: z.string(),
+    kitNumber: z.int(),
     letter: z.string(),
     why: z.string(),
   }),

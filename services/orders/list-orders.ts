@@ -88,7 +88,7 @@ async function page(query: Knex.QueryBuilder, after: string | undefined, forStaf
   });
 }
 
-/** "2 Ebb Lamp B, 1 Tollgate F" by order. */
+/** "2 Ebb Lamp 7 B, 1 Tollgate 4 F" by order. */
 async function kitsOf(orderIds: readonly string[]): Promise<Map<string, { kits: string; quantity: number }>> {
   if (orderIds.length === 0) return new Map();
   const lines = await reading()('order_lines')
@@ -96,16 +96,17 @@ async function kitsOf(orderIds: readonly string[]): Promise<Map<string, { kits: 
     .join('kits', 'kits.id', 'versions.kit_id')
     .whereIn('order_lines.order_id', [...orderIds])
     .orderBy(['order_lines.order_id', 'order_lines.position'])
-    .select<{ orderId: string; name: string; letter: string; quantity: number }[]>({
+    .select<{ orderId: string; name: string; number: number; letter: string; quantity: number }[]>({
       orderId: 'order_lines.order_id',
       name: 'kits.name',
+      number: 'kits.number',
       letter: 'versions.letter',
       quantity: 'order_lines.quantity',
     });
   const byOrder = new Map<string, { kits: string; quantity: number }>();
-  for (const { orderId, name, letter, quantity } of lines) {
+  for (const { orderId, name, number, letter, quantity } of lines) {
     const before = byOrder.get(orderId);
-    const words = `${quantity} ${name} ${letter}`;
+    const words = `${quantity} ${name} ${number}\u202f${letter}`;
     byOrder.set(orderId, {
       kits: before ? `${before.kits}, ${words}` : words,
       quantity: (before?.quantity ?? 0) + quantity,
