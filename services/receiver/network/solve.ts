@@ -64,7 +64,7 @@ export function topAdmittance(circuit: Circuit, f: Hertz): void {
     circuit.topIm = circuit.aerialYi - x / size + w * (circuit.cSelf + circuit.stray + circuit.cj);
     return;
   }
-  const n = nodalInverse(circuit, f, 0, circuit.loadG);
+  const n = nodalInverse(circuit, f, 0, true);
   const top = circuit.sections - 1;
   const r = at(circuit.yr, top * n + top);
   const i = at(circuit.yi, top * n + top);
@@ -83,7 +83,7 @@ export function capacitanceNeeded(circuit: Circuit, f: Hertz): Farad {
  * Impedance matrix of the nodes, into yr and yi; returns the number of nodes. The aerial's admittance must be up to
  * date.
  */
-function nodalInverse(circuit: Circuit, f: Hertz, tuning: Farad, loadG: number): number {
+function nodalInverse(circuit: Circuit, f: Hertz, tuning: Farad, loaded: boolean): number {
   const w = TWO_PI * f;
   const { sections, zr, zi, yr, yi, m, share } = circuit;
   const branches = circuit.primary ? sections + 1 : sections;
@@ -119,7 +119,7 @@ function nodalInverse(circuit: Circuit, f: Hertz, tuning: Farad, loadG: number):
   const foil = circuit.foilTan > 0 && tuning > 0 ? w * tuning * circuit.foilTan : 0;
   yr[top] = at(yr, top) + foil;
   yi[top] = at(yi, top) + w * (circuit.cSelf + circuit.stray + tuning);
-  yr[tap] = at(yr, tap) + loadG;
+  if (loaded) yr[tap] = at(yr, tap) + circuit.loadG;
   yi[tap] = at(yi, tap) + w * circuit.cj;
   yr[aerial] = at(yr, aerial) + circuit.aerialYr;
   yi[aerial] = at(yi, aerial) + circuit.aerialYi;
@@ -158,7 +158,7 @@ export function voltagePerEmf(circuit: Circuit, f: Hertz, tuning: Farad): number
     const im = circuit.topIm + w * tuning;
     return driven / Math.sqrt(re * re + im * im);
   }
-  const n = nodalInverse(circuit, f, tuning, circuit.loadG);
+  const n = nodalInverse(circuit, f, tuning, true);
   const cell = circuit.detectorNode * n + circuit.aerialNode;
   const re = at(circuit.yr, cell);
   const im = at(circuit.yi, cell);
@@ -177,7 +177,7 @@ export function sourceResistance(circuit: Circuit, f: Hertz, tuning: Farad): Ohm
     topAdmittance(circuit, f);
     return 1 / (circuit.topRe - circuit.loadG + (tuning > 0 ? TWO_PI * f * tuning * circuit.foilTan : 0));
   }
-  const n = nodalInverse(circuit, f, tuning, 0);
+  const n = nodalInverse(circuit, f, tuning, false);
   const cell = circuit.detectorNode * n + circuit.detectorNode;
   const re = at(circuit.yr, cell);
   const im = at(circuit.yi, cell);
