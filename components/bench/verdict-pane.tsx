@@ -6,6 +6,7 @@ import { VisuallyHidden } from '@/components/ui/visually-hidden';
 import { fieldOf } from '@/services/kits/rules';
 import type { VersionContent } from '@/services/kits/schemas';
 import { grouped } from '@/services/quantity';
+import { DownloadDesign } from './download-design';
 import { FindingList } from './finding-list';
 import { LimitList } from './limit-list';
 import { RemedyCards } from './remedy-cards';
@@ -109,6 +110,9 @@ function Worked({
       {remedies !== null && remedies.length > 0 && <RemedyCards band={band} remedies={remedies} onTry={onTry} />}
       <FindingList findings={findings} />
       <LimitList limits={verdict.limits} />
+      <p>
+        <DownloadDesign content={content} />
+      </p>
     </div>
   );
 }

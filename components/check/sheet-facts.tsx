@@ -1,3 +1,4 @@
+import { DownloadDesign } from '@/components/bench/download-design';
 import { partWords } from '@/components/bench/part-words';
 import { Disclosure } from '@/components/ui/disclosure';
 import { Facts } from '@/components/ui/figure-text';
@@ -33,6 +34,9 @@ export function SheetFacts({ sheet }: { sheet: Sheet }) {
           },
         ]}
       />
+      <p className="mt-2">
+        <DownloadDesign content={content} />
+      </p>
       <Disclosure summary={`Its ${lines.length} lines`} className="mt-2">
         <Table
           caption="Lines of the version as they were sent"

@@ -2,6 +2,7 @@ import type { Verdict } from '../receiver';
 import type { Circuit, FrozenLine, VersionContent, VersionState } from './schemas';
 import { type Finding, versionFindings } from './version-findings';
 
+export { designFile } from './design-file';
 export { type DesignOutcome, designOf, valuesAt } from './design-of';
 export { type Difference, differences, quantityWords } from './differences';
 export { type FindingField, fieldOf } from './finding-place';
