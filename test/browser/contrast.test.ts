@@ -132,7 +132,7 @@ test.each(looks)('as $who, no text is faint in the $scheme', async ({ who, schem
   const faint: Record<string, Faint[]> = {};
   for (const path of paths) {
     await visitor.go(await pathOf(path));
-    await page.waitForLoadState('networkidle');
+    await visitor.settled();
     const found = await page.evaluate(faintTexts);
     if (found.length > 0) faint[path] = found;
   }

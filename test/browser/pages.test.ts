@@ -38,17 +38,6 @@ async function tooWide({ page }: Visitor): Promise<number[]> {
   return found;
 }
 
-/** Until nothing is left to do: the scripts have run, and what a page works out by itself, the verdict say, stands. */
-async function settled({ page }: Visitor): Promise<void> {
-  await page.evaluate(() => new Promise((idle) => requestIdleCallback(() => requestIdleCallback(idle))));
-  if (/^\/bench\/[0-9a-z]{26}$/.test(new URL(page.url()).pathname)) {
-    await page
-      .getByText(/^Worked out with/)
-      .first()
-      .waitFor();
-  }
-}
-
 const headingsOf = ({ page }: Visitor) => page.locator('h1').count();
 
 describe.each(everybody)('as %s', (who) => {
@@ -60,7 +49,7 @@ describe.each(everybody)('as %s', (who) => {
     const answer = await page.goto(await pathOf(path));
     expect(answer?.status()).toBe(200);
     await page.locator('h1').first().waitFor();
-    await settled(visitor);
+    await visitor.settled();
     expect(await visitor.faults()).toEqual([]);
     expect(await tooWide(visitor)).toEqual([]);
     expect(await headingsOf(visitor)).toBe(1);
@@ -83,7 +72,7 @@ describe.each(pages.filter((page) => page.dark))('$path in the dark', ({ path, w
     await visitor.page.emulateMedia({ colorScheme: 'dark' });
     try {
       await visitor.go(await pathOf(path));
-      await settled(visitor);
+      await visitor.settled();
       const ground = await visitor.page.evaluate(
         () => getComputedStyle(document.querySelector('[data-theme]') ?? document.body).backgroundColor,
       );

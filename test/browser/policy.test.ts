@@ -43,7 +43,7 @@ describe.each(everybody)('as %s', (who) => {
     const reports: string[] = [];
     for (const { path } of pages.filter((page) => page.who[0] === who)) {
       await visitor.go(await pathOf(path));
-      await visitor.page.waitForLoadState('networkidle');
+      await visitor.settled();
       reports.push(...(await reportsOf(visitor)));
     }
     expect(reports).toEqual([]);

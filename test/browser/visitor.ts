@@ -69,6 +69,17 @@ export class Visitor {
     await this.page.goto(path);
   }
 
+  /** Until nothing is left to do: the scripts have run, and what a page works out by itself, the verdict say, stands. */
+  async settled(): Promise<void> {
+    await this.page.evaluate(() => new Promise((idle) => requestIdleCallback(() => requestIdleCallback(idle))));
+    if (/^\/bench\/[0-9a-z]{26}$/.test(new URL(this.page.url()).pathname)) {
+      await this.page
+        .getByText(/^Worked out with/)
+        .first()
+        .waitFor();
+    }
+  }
+
   /** What the browser complained of since this was asked last. */
   takeComplaints(): string[] {
     return this.complaints.splice(0);
