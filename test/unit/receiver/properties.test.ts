@@ -35,13 +35,20 @@ describe('in sets of every form the reach falls, or stays where it is held,', ()
     ['stray capacitance', (design, factor) => ({ ...design, stray: Number(design.stray ?? 0) + factor * 4e-12 })],
     ['inductance', (design, factor) => ({ ...design, coil: { ...design.coil, lFactor: factor } })],
   ];
-  test.each(grown)('when %s grows', { timeout: LONG }, (_, grow) => {
+  /**
+   * Below this loaded Q a resistance across a tap decides what capacitance is needed, and more inductance may raise the
+   * upper end: at a Q of 0.3 by 2 %, which ngspice gives to 1e-10 as well. Stray capacitance has no such exception.
+   */
+  const RESONATES = 2;
+  const resonates = ({ points }: Verdict): boolean => points.every(({ q }) => q === null || q >= RESONATES);
+  test.each(grown)('when %s grows', { timeout: LONG }, (what, grow) => {
     let moved = 0;
     fc.assert(
       fc.property(exactDesign, fc.double({ min: 1.02, max: 1.6, noNaN: true }), (design, factor) => {
         const before = verdictOf(design);
         const after = verdictOf(grow(design, factor));
         if (before === null || after === null) return;
+        if (what === 'inductance' && !(resonates(before) && resonates(after))) return;
         expect(after.reach.nominal.lo).toBeLessThanOrEqual(before.reach.nominal.lo * SLACK);
         expect(after.reach.nominal.hi).toBeLessThanOrEqual(before.reach.nominal.hi * SLACK);
         if (after.reach.nominal.lo < before.reach.nominal.lo) moved += 1;
