@@ -3,7 +3,7 @@ import { expect, test } from 'vitest';
 import { evaluate, InvalidInput, Verdict } from '@/services/receiver';
 import { wildDesign } from './wild-design';
 
-const RUNS = { numRuns: process.env['SCHEDULES'] === undefined ? 400 : 5000, seed: 20261203 };
+const RUNS = { numRuns: process.env['SCHEDULES'] === undefined ? 300 : 5000, seed: 20261203 };
 /** Longest that one design may take, millisecond: a hang would be far beyond. */
 const PATIENCE = 20_000;
 
